@@ -1,0 +1,26 @@
+import { defineConfig } from "vitest/config";
+import { versionDefine } from "./scripts/version.mjs";
+
+const apart = { outside: "test/outside/**/*.test.ts", browser: "test/browser/**/*.test.ts" };
+
+/**
+ * Three projects, run in turn by `npm test`: `unit`, the checks against `outside` sources, the built page in a `browser`.
+ * A worker written in TypeScript does not start under vitest on Node 20: test the built worker, and the task in-process.
+ */
+export default defineConfig({
+  define: versionDefine,
+  test: {
+    projects: [
+      {
+        extends: true,
+        test: { name: "unit", include: ["test/**/*.test.ts"], exclude: [...Object.values(apart), "test/bench/**"] },
+      },
+      { extends: true, test: { name: "outside", include: [apart.outside] } },
+      {
+        extends: true,
+        // One browser at a time: drawing in software takes every core there is.
+        test: { name: "browser", include: [apart.browser], fileParallelism: false, testTimeout: 120_000, hookTimeout: 180_000 },
+      },
+    ],
+  },
+});
