@@ -29,29 +29,33 @@ export interface Sidelobes {
 export function sidelobes(plane: BeamPlane, rays: Rays, radiusRad: number): Sidelobes | undefined {
   const { size, values, xl: pixelRad } = plane;
   const half = size / 2;
-  const reach = Math.min(half - 1, Math.floor(radiusRad / pixelRad));
-  const outer = (radiusRad / pixelRad) ** 2;
+  const outer = radiusRad / pixelRad;
+  const reach = Math.min(half - 1, Math.ceil(outer));
   const inner = lobeRadii(rays, pixelRad);
   let squares = 0;
-  let count = 0;
+  let area = 0;
   let highest = Number.NEGATIVE_INFINITY;
   let deepest = Number.POSITIVE_INFINITY;
   const beyond = new Uint8Array(size * size);
   for (let y = 0; y <= reach; y++) {
     for (let x = y === 0 ? 1 : -reach; x <= reach; x++) {
-      const r2 = x * x + y * y;
-      if (r2 > outer) continue;
-      if (r2 < inner.least || (r2 <= inner.most && !(Math.sqrt(r2) >= radiusAt(inner.radii, Math.atan2(x, y))))) continue;
+      const r = Math.sqrt(x * x + y * y);
+      if (r < inner.least - 1 || r > outer + 1) continue;
+      const lobe = r > inner.most + 1 ? inner.most : radiusAt(inner.radii, Math.atan2(x, y));
+      // A pixel that either edge cuts counts by its part beyond it: whole pixels would leave 2 % of chance in the rms.
+      const part = Math.min(1, Math.max(0, r - lobe + 0.5)) * Math.min(1, Math.max(0, outer - r + 0.5));
+      if (!(part > 0)) continue;
       const at = size * (y + half) + x + half;
       const value = values[at];
+      squares += part * value * value;
+      area += part;
+      if (r < lobe || r > outer) continue;
       beyond[at] = 1;
-      squares += value * value;
-      count++;
       if (value > highest) highest = value;
       if (value < deepest) deepest = value;
     }
   }
-  if (count === 0) return undefined;
+  if (!(highest >= deepest)) return undefined;
   const high = refined(plane, beyond, highest, 1);
   let low = refined(plane, beyond, deepest, -1);
   for (let k = 0; k < RAY_COUNT; k++) {
@@ -59,15 +63,15 @@ export function sidelobes(plane: BeamPlane, rays: Rays, radiusRad: number): Side
       low = { value: rays.minimum[k], offsetRad: rays.minimumRad[k], positionAngleRad: (Math.PI * k) / RAY_COUNT };
     }
   }
-  return { highest: high, deepest: low, rms: Math.sqrt(squares / count) };
+  return { highest: high, deepest: low, rms: Math.sqrt(squares / area) };
 }
 
-/** The main lobe's radii in pixels, and the squares between which a pixel may lie on either side of it. */
+/** The main lobe's radii in pixels, the least and the most of them. */
 function lobeRadii(rays: Rays, pixelRad: number): { radii: Float64Array; least: number; most: number } {
   const radii = rays.minimumRad.map((r) => (Number.isNaN(r) ? Number.POSITIVE_INFINITY : r / pixelRad));
   const least = Math.min(...radii);
   const most = Math.max(...radii);
-  return { radii, least: least * least, most: most * most };
+  return { radii, least, most };
 }
 
 /** Extremes within a tenth of the largest pixel are refined, so that one just missed by the pixels cannot win unseen. */

@@ -1,0 +1,57 @@
+import { PlanFaults } from "./faults.ts";
+
+/** Largest plan file, bytes. */
+export const MOST_BYTES = 64 * 1024 * 1024;
+/** Deeper nesting than any plan has: JSON.parse recurses, and a file of brackets would exhaust its stack. */
+const DEEPEST = 64;
+
+/** @throws {@link PlanFaults} for a file that is too large to be a plan. */
+export function checkPlanSize(bytes: number): void {
+  if (bytes > MOST_BYTES) fault(`${bytes} bytes long`, "at most 64 MiB");
+}
+
+/**
+ * JSON text to plain values.
+ *
+ * @throws {@link PlanFaults} with one fault: too large, nested too deeply, or not JSON, with line and column.
+ */
+export function parseJson(text: string): unknown {
+  checkPlanSize(text.length);
+  const body = text.charCodeAt(0) === 0xfeff ? text.slice(1) : text;
+  const depth = nesting(body);
+  if (depth > DEEPEST) fault(`nested ${depth} deep`, `at most ${DEEPEST} levels of brackets`);
+  try {
+    return JSON.parse(body);
+  } catch (error) {
+    return fault(`not JSON: ${place(body, error as Error)}`, "a JSON document");
+  }
+}
+
+function fault(found: string, expected: string): never {
+  throw new PlanFaults([{ path: "the file", value: undefined, found, expected }]);
+}
+
+/** Deepest nesting of brackets outside strings; counts no further than it must. */
+function nesting(text: string): number {
+  let depth = 0;
+  let deepest = 0;
+  let inString = false;
+  for (let k = 0; k < text.length; k++) {
+    const c = text.charCodeAt(k);
+    if (inString) {
+      if (c === 92) k++;
+      else if (c === 34) inString = false;
+    } else if (c === 34) inString = true;
+    else if (c === 91 || c === 123) deepest = Math.max(deepest, ++depth);
+    else if (c === 93 || c === 125) depth--;
+  }
+  return deepest;
+}
+
+/** Line and column where the parser stopped; engines word their messages differently, and some give no position. */
+function place(text: string, error: Error): string {
+  const position = /position (\d+)/.exec(error.message)?.[1];
+  if (position === undefined) return error.message;
+  const before = text.slice(0, Number(position)).split("\n");
+  return `line ${before.length}, column ${before[before.length - 1].length + 1}`;
+}
