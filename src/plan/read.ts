@@ -24,14 +24,20 @@ export function readPlan(text: string): ReadPlan {
 export function checkedPlan(document: unknown): ReadPlan {
   const current = migrated(document);
   const result = v.safeParse(planSchema, current);
-  if (!result.success) throw new PlanFaults(result.issues.flatMap(issueFaults));
+  if (!result.success) throw new PlanFaults(firstOfEach(result.issues.map(issueFault)));
   const faults = crossFaults(result.output);
   if (faults.length > 0) throw new PlanFaults(faults);
   return { plan: result.output, warnings: [...unknownKeys(current), ...crossWarnings(result.output)] };
 }
 
-function issueFaults(issue: v.BaseIssue<unknown>): Fault[] {
-  return [{ path: pathText(issue), value: foundValue(issue), expected: allowed(issue) }];
+/** One fault a place: infinity is not finite and past every bound, but it is one mistake. */
+function firstOfEach(faults: readonly Fault[]): Fault[] {
+  const seen = new Set<string>();
+  return faults.filter(({ path }) => !seen.has(path) && seen.add(path));
+}
+
+function issueFault(issue: v.BaseIssue<unknown>): Fault {
+  return { path: pathText(issue), value: issue.input, expected: allowed(issue) };
 }
 
 function pathText(issue: v.BaseIssue<unknown>): string {
@@ -41,11 +47,6 @@ function pathText(issue: v.BaseIssue<unknown>): string {
     else text += text === "" ? String(key) : `.${String(key)}`;
   }
   return text;
-}
-
-/** valibot hands a missing key's issue the whole object's place and no input. */
-function foundValue(issue: v.BaseIssue<unknown>): unknown {
-  return issue.input;
 }
 
 const TYPES: { readonly [expected: string]: string } = {
@@ -59,6 +60,8 @@ const TYPES: { readonly [expected: string]: string } = {
 /** What the schema allows, in words: our own where the schema gives them, else the type or bound. */
 function allowed(issue: v.BaseIssue<unknown>): string {
   const requirement = issue.requirement as number | undefined;
+  // valibot reports a missing key as an issue of the object that lacks it.
+  if (issue.received === "undefined" && issue.type.endsWith("object")) return "a value: it has no default";
   switch (issue.type) {
     case "finite":
       return "a finite number";
