@@ -18,8 +18,8 @@ export function squarePlane(size: number, pixelRad: number, beam: (l: number, m:
   return planeOf(squareAxes(size, pixelRad), beam);
 }
 
-/** Bessel functions of the first kind, order 0 or 1, by their integral (Abramowitz & Stegun 1964, 9.1.21), exact to rounding. */
-export function besselJ(order: 0 | 1, x: number): number {
+/** Bessel functions of the first kind, whole order, by their integral (Abramowitz & Stegun 1964, 9.1.21), exact to rounding. */
+export function besselJ(order: number, x: number): number {
   const n = 64 + 2 * Math.ceil(Math.abs(x));
   let sum = 0;
   for (let k = 0; k < n; k++) {
