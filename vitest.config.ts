@@ -10,6 +10,9 @@ const apart = { outside: "test/outside/**/*.test.ts", browser: "test/browser/**/
 export default defineConfig({
   define: versionDefine,
   test: {
+    // Ends what hangs, judges nothing: a busy machine may take many times what a quiet one does.
+    testTimeout: 300_000,
+    hookTimeout: 300_000,
     projects: [
       {
         extends: true,
@@ -19,7 +22,7 @@ export default defineConfig({
       {
         extends: true,
         // One browser at a time: drawing in software takes every core there is.
-        test: { name: "browser", include: [apart.browser], fileParallelism: false, testTimeout: 120_000, hookTimeout: 180_000 },
+        test: { name: "browser", include: [apart.browser], fileParallelism: false },
       },
     ],
   },

@@ -15,6 +15,7 @@ import {
   timeSmearingRad,
 } from "../engine/measure/scales.ts";
 import { noiseFactor } from "../engine/synthesis/sums.ts";
+import { TOO_HIGH, TOO_LOW, type Visibility } from "../engine/synthesis/visibility.ts";
 import type { Pair, Plan } from "../plan/schema.ts";
 import { type MeasuredBeam, measureBeam } from "./beam.ts";
 import type { AssessResult, BeamFigures, PairResult } from "./result.ts";
@@ -103,7 +104,7 @@ function figures(synthesis: Synthesis, beam: MeasuredBeam | undefined, pair: Pai
   warnOfLayout(
     given.stations.map((s) => s.id),
     lengths,
-    seen.visible,
+    seen,
     kept,
     warnings,
   );
@@ -244,13 +245,18 @@ export function chords(ecefM: Float64Array): { longest: number | null; shortest:
 function warnOfLayout(
   ids: readonly string[],
   lengths: { shortest: number | null },
-  visible: number,
+  seen: Visibility,
   kept: boolean,
   warnings: string[],
 ): void {
   if (ids.length === 1) warnings.push("the layout has one station: there is no baseline, no beam and no noise figure");
-  else if (visible === 0) warnings.push("the source never rises above the elevation limits within the window: no samples");
-  else if (!kept) warnings.push("no two stations see the source at the same time: no samples");
+  else if (seen.visible === 0) {
+    const where = seen.flags.every((flag) => flag === TOO_HIGH)
+      ? "stays above the upper elevation limits"
+      : "never rises above the elevation limits";
+    const mixed = seen.flags.some((flag) => flag === TOO_HIGH) && seen.flags.some((flag) => flag === TOO_LOW);
+    warnings.push(`the source ${mixed ? "is never within the elevation limits" : where} within the window: no samples`);
+  } else if (!kept) warnings.push("no two stations see the source at the same time: no samples");
   if (lengths.shortest === 0) warnings.push("two stations of the layout stand at one place");
 }
 
@@ -268,9 +274,12 @@ function warnOfRadius(
     ["planar", planarRadiusArcsec],
   ] as const) {
     if (limit !== null && radius > limit) {
-      warnings.push(
-        `the sidelobe radius, ${radius.toPrecision(4)} arcsec, exceeds the ${name} radius, ${limit.toPrecision(4)} arcsec`,
-      );
+      warnings.push(`the sidelobe radius, ${figure(radius)} arcsec, exceeds the ${name} radius, ${figure(limit)} arcsec`);
     }
   }
+}
+
+/** Four figures, without an exponent where there is room. */
+function figure(x: number): string {
+  return String(Number(x.toPrecision(4)));
 }

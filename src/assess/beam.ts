@@ -120,4 +120,4 @@ function imageAxes(
   return squareAxes(Math.min(LARGEST_IMAGE, Math.max(64, covering)), pixelRad);
 }
 
-const arcsec = (rad: number): string => (rad * ARCSEC_PER_RAD).toPrecision(4);
+const arcsec = (rad: number): string => String(Number((rad * ARCSEC_PER_RAD).toPrecision(4)));

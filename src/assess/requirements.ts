@@ -108,9 +108,9 @@ async function judgeOne(line: Requirement, bench: Bench, checkpoint: Checkpoint)
         checkpoint((done + part) / (observations.length * points.length)),
       );
       done++;
-      const value = quantityOf(result, line.quantity);
+      const value = judgedValue(result, line.quantity);
       if (value === undefined) return cannot(`${line.quantity} is not a quantity that is computed yet`, observation);
-      if (value === null) return cannot(reasonFor(result, point), observation);
+      if (value === null) return cannot(reasonFor(result, line.quantity, point), observation);
       if (!worst || (sense === "atMost" ? value > worst.value : value < worst.value)) worst = { value, observation, point };
     }
   }
@@ -142,8 +142,26 @@ function rangePoints(line: Requirement): readonly (Point | null)[] {
 
 const pointText = (point: Point): string => (point.axis === "declination" ? `${point.at}°` : `${point.at} m`);
 
-function reasonFor(result: AssessResult, point: Point | null): string {
-  const reason = result.warnings[0] ?? "this quantity cannot be had here";
+/** A blended pair has no dip, which falls short of any: a line about the dip is not met, rather than not computable. */
+function judgedValue(result: AssessResult, quantity: string): number | null | undefined {
+  return quantity === "pair.dip" && result.pair?.verdict === "blended" ? 0 : quantityOf(result, quantity);
+}
+
+/** Which warning explains that a quantity is null: the first pair whose parts both match. */
+const REASONS: readonly (readonly [quantity: RegExp, warning: RegExp])[] = [
+  [/./, /no samples|has one station/],
+  [/^(noiseJy|brightnessNoiseK)$/, /has no receiver/],
+  [/^(beam\.(major|minor|axis|position)|smearing|brightness)/, /no fitted ellipse/],
+  [/^beam\.firstZero/, /fall to zero/],
+  [/^beam\.firstMinimum/, /no first minimum/],
+  [/Sidelobe$/, /beyond the main lobe|one place|uv samples/],
+  [/^(largestScale|recoverable)/, /projected baseline has no length/],
+  [/^pair/, /apart, which the image does not cover/],
+];
+
+function reasonFor(result: AssessResult, quantity: string, point: Point | null): string {
+  const explains = (warning: string): boolean => REASONS.some(([q, w]) => q.test(quantity) && w.test(warning));
+  const reason = result.warnings.find(explains) ?? "this quantity cannot be had here";
   return point ? `at ${point.axis} ${pointText(point)}: ${reason}` : reason;
 }
 

@@ -29,5 +29,7 @@ export function faultLines(faults: readonly Fault[]): string[] {
   const lines = faults
     .slice(0, NAMED)
     .map(({ path, value, found, expected }) => `${path || "the plan"} is ${found ?? shown(value)}; expected ${expected}.`);
-  return faults.length > NAMED ? [...lines, `… and ${faults.length - NAMED} more faults.`] : lines;
+  return faults.length > NAMED
+    ? [...lines, `… and ${faults.length - NAMED} more fault${faults.length === NAMED + 1 ? "" : "s"}.`]
+    : lines;
 }

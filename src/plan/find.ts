@@ -35,6 +35,7 @@ function found<T extends { readonly id: string }>(kind: string, id: string, rows
   return row;
 }
 
-function someOf(ids: readonly string[]): string {
+/** A list for a message, cut short. */
+export function someOf(ids: readonly string[]): string {
   return ids.length > 12 ? `${ids.slice(0, 12).join(", ")} and ${ids.length - 12} more` : ids.join(", ");
 }

@@ -1,179 +1,192 @@
 import * as v from "valibot";
-
-/** GeoJSON polygons (RFC 7946): rings of [longitude, latitude] in degrees, closed. */
-const position = v.pipe(
-  v.array(v.pipe(v.number(), v.finite())),
-  v.minLength(2, "two or three numbers: longitude, latitude and perhaps height"),
-  v.maxLength(3, "two or three numbers: longitude, latitude and perhaps height"),
-);
-const ring = v.pipe(v.array(position), v.minLength(4, "at least 4 positions, the last equal to the first"));
-export const geometrySchema = v.variant("type", [
-  v.looseObject({ type: v.literal("Polygon"), coordinates: v.pipe(v.array(ring), v.minLength(1)) }),
-  v.looseObject({
-    type: v.literal("MultiPolygon"),
-    coordinates: v.pipe(v.array(v.pipe(v.array(ring), v.minLength(1))), v.minLength(1)),
-  }),
-]);
-
-const number = (min: number, max: number, what: string) =>
-  v.pipe(v.number(), v.finite(), v.minValue(min, what), v.maxValue(max, what));
-const positive = (what: string) => v.pipe(v.number(), v.finite(), v.gtValue(0, what));
-const id = v.pipe(
-  v.string(),
-  v.regex(/^[\p{L}\p{N}][\p{L}\p{N} ._-]{0,63}$/u, "a name of 1 to 64 letters, digits, spaces, dots, dashes"),
-);
-const label = v.pipe(v.string(), v.maxLength(200, "at most 200 characters"));
-const latitude = number(-90, 90, "a latitude in [-90, 90] degrees");
-const longitude = number(-180, 360, "a longitude in [-180, 360] degrees");
-const height = number(-11_000, 100_000, "a height in [-11000, 100000] metres");
+import { list, oneOf, orNull, positive, ranged, record, text, whole } from "./fields.ts";
 
 export const FORMAT = "spanwright-plan";
 export const VERSION = 1;
+/** Most stations of a plan. */
+export const MOST_STATIONS = 4096;
 
-export const receiverSchema = v.looseObject({
-  fromHz: positive("a frequency above 0 Hz"),
-  toHz: positive("a frequency above 0 Hz"),
-  sefdJy: positive("a system equivalent flux density above 0 Jy"),
+const id = v.pipe(
+  v.string("a name of 1 to 64 letters, digits, spaces, dots, dashes"),
+  v.regex(/^[\p{L}\p{N}][\p{L}\p{N} ._-]{0,63}$/u, "a name of 1 to 64 letters, digits, spaces, dots, dashes"),
+);
+const label = text(200);
+const latitude = ranged(-90, 90, "a latitude in [-90, 90] degrees");
+const longitude = ranged(-180, 360, "a longitude in [-180, 360] degrees");
+const height = ranged(-11_000, 100_000, "a height in [-11000, 100000] metres");
+const elevation = ranged(-90, 90, "an elevation in [-90, 90] degrees");
+const hours = ranged(-12, 12, "an hour angle in [-12, 12] hours");
+const price = ranged(0, 1e12, "a price in [0, 1e12]");
+/** Half the sky: no angle on an image is larger. */
+const angle = (what: string) => positive(648_000, what, "arcsec");
+const frequency = (what: string) => positive(1e13, what, "Hz");
+const utc = v.pipe(
+  v.string("a UTC time such as 2027-03-21T18:00:00Z, or null"),
+  v.isoTimestamp("a UTC time such as 2027-03-21T18:00:00Z, or null"),
+  v.check(isRealDate, "a day that the calendar has"),
+);
+
+/** GeoJSON polygons (RFC 7946): rings of [longitude, latitude] in degrees, closed. */
+const position = v.pipe(
+  list(v.pipe(v.number("a number of degrees"), v.finite("a finite number of degrees")), "a position: longitude, latitude"),
+  v.minLength(2, "two or three numbers: longitude, latitude and perhaps height"),
+  v.maxLength(3, "two or three numbers: longitude, latitude and perhaps height"),
+);
+const ring = v.pipe(
+  list(position, "a ring: a list of positions"),
+  v.minLength(4, "at least 4 positions, the last equal to the first"),
+);
+const polygon = v.pipe(list(ring, "a list of rings"), v.minLength(1, "at least one ring"));
+export const geometrySchema = v.variant(
+  "type",
+  [
+    record({ type: v.literal("Polygon"), coordinates: polygon }),
+    record({
+      type: v.literal("MultiPolygon"),
+      coordinates: v.pipe(list(polygon, "a list of polygons"), v.minLength(1, "at least one polygon")),
+    }),
+  ],
+  ({ path }) => (path ? '"Polygon" or "MultiPolygon"' : "a GeoJSON Polygon or MultiPolygon"),
+);
+
+export const receiverSchema = record({
+  fromHz: frequency("a frequency"),
+  toHz: frequency("a frequency"),
+  sefdJy: positive(1e12, "a system equivalent flux density", "Jy"),
 });
 
-export const antennaSchema = v.looseObject({
+export const antennaSchema = record({
   id,
   label: v.optional(label, ""),
-  diameterM: positive("a diameter above 0 m"),
-  elevationLimitDeg: v.optional(number(-90, 90, "an elevation in [-90, 90] degrees"), 0),
-  elevationUpperLimitDeg: v.optional(number(-90, 90, "an elevation in [-90, 90] degrees"), 90),
-  minSpacingM: v.optional(number(0, 1e6, "a spacing in [0, 1000000] metres"), 0),
-  beamFactor: v.optional(number(0.5, 3, "a factor in [0.5, 3]"), 1.029),
-  receivers: v.optional(v.array(receiverSchema), []),
+  diameterM: positive(10_000, "a diameter", "m"),
+  elevationLimitDeg: v.optional(elevation, 0),
+  elevationUpperLimitDeg: v.optional(elevation, 90),
+  minSpacingM: v.optional(ranged(0, 1e6, "a spacing in [0, 1000000] metres"), 0),
+  beamFactor: v.optional(ranged(0.5, 3, "a factor in [0.5, 3]"), 1.029),
+  receivers: v.optional(list(receiverSchema, "a list of receivers"), []),
 });
 
-export const stationSchema = v.looseObject({
+export const stationSchema = record({
   id,
   name: v.optional(label, ""),
   latitudeDeg: latitude,
   longitudeDeg: longitude,
   heightM: v.optional(height, 0),
   antenna: id,
-  locked: v.optional(v.boolean(), false),
+  locked: v.optional(v.boolean("true or false"), false),
 });
 
-export const layoutSchema = v.looseObject({
+export const layoutSchema = record({
   id,
   label: v.optional(label, ""),
-  stations: v.pipe(v.array(id), v.minLength(1, "at least one station")),
+  stations: v.pipe(list(id, "a list of station ids"), v.minLength(1, "at least one station")),
 });
 
-export const weightingSchema = v.looseObject({
-  scheme: v.optional(v.picklist(["natural", "uniform", "robust"]), "natural"),
-  robustness: v.optional(number(-2, 2, "a robustness in [-2, 2]"), 0),
-  taperArcsec: v.optional(v.nullable(positive("a taper above 0 arcsec, or null")), null),
-  fieldArcsec: v.optional(v.nullable(positive("a field above 0 arcsec, or null")), null),
+export const weightingSchema = record({
+  scheme: v.optional(oneOf(["natural", "uniform", "robust"]), "natural"),
+  robustness: v.optional(ranged(-2, 2, "a robustness in [-2, 2]"), 0),
+  taperArcsec: orNull(angle("a taper")),
+  fieldArcsec: orNull(angle("a field")),
 });
 
-export const imageSchema = v.looseObject({
-  pixelArcsec: v.optional(v.nullable(positive("a pixel above 0 arcsec, or null")), null),
-  sizePx: v.optional(v.nullable(v.pipe(v.number(), v.integer(), v.minValue(32), v.maxValue(4096))), null),
-  sidelobeRadiusArcsec: v.optional(v.nullable(positive("a radius above 0 arcsec, or null")), null),
+export const imageSchema = record({
+  pixelArcsec: orNull(angle("a pixel")),
+  sizePx: orNull(whole(32, 4096)),
+  sidelobeRadiusArcsec: orNull(angle("a radius")),
 });
 
-export const observationSchema = v.looseObject({
+export const observationSchema = record({
   id,
   label: v.optional(label, ""),
-  declinationDeg: number(-90, 90, "a declination in [-90, 90] degrees"),
-  rightAscensionDeg: v.optional(v.nullable(number(0, 360, "a right ascension in [0, 360] degrees")), null),
-  epoch: v.optional(v.picklist(["date", "J2000"]), "date"),
-  startUtc: v.optional(v.nullable(v.pipe(v.string(), v.isoTimestamp("a UTC time such as 2027-03-21T18:00:00Z"))), null),
-  hourAngle: v.looseObject({
-    fromH: number(-12, 12, "an hour angle in [-12, 12] hours"),
-    toH: number(-12, 12, "an hour angle in [-12, 12] hours"),
-  }),
-  elevationLimitDeg: v.optional(number(-90, 90, "an elevation in [-90, 90] degrees"), 0),
-  frequencyHz: number(1e3, 1e13, "a frequency in [1000, 1e13] hertz"),
-  bandwidthHz: v.optional(positive("a bandwidth above 0 Hz"), 1e6),
-  channels: v.optional(v.pipe(v.number(), v.integer(), v.minValue(1), v.maxValue(65_536)), 1),
-  integrationS: v.optional(number(0.001, 86_400, "an integration in [0.001, 86400] seconds"), 60),
-  repeats: v.optional(v.pipe(v.number(), v.integer(), v.minValue(1), v.maxValue(100_000)), 1),
-  polarizations: v.optional(v.picklist([1, 2]), 2),
-  efficiency: v.optional(v.pipe(v.number(), v.finite(), v.gtValue(0), v.maxValue(1)), 1),
+  declinationDeg: ranged(-90, 90, "a declination in [-90, 90] degrees"),
+  rightAscensionDeg: orNull(ranged(0, 360, "a right ascension in [0, 360] degrees")),
+  epoch: v.optional(oneOf(["date", "J2000"]), "date"),
+  startUtc: orNull(utc),
+  hourAngle: record({ fromH: hours, toH: hours }),
+  elevationLimitDeg: v.optional(elevation, 0),
+  frequencyHz: ranged(1e3, 1e13, "a frequency in [1000, 1e13] hertz"),
+  bandwidthHz: v.optional(frequency("a bandwidth"), 1e6),
+  channels: v.optional(whole(1, 65_536), 1),
+  integrationS: v.optional(ranged(0.001, 86_400, "an integration in [0.001, 86400] seconds"), 60),
+  repeats: v.optional(whole(1, 100_000), 1),
+  polarizations: v.optional(oneOf([1, 2]), 2),
+  efficiency: v.optional(positive(1, "an efficiency"), 1),
   weighting: v.optional(weightingSchema, {}),
   image: v.optional(imageSchema, {}),
 });
 
-const rangeSchema = v.looseObject({
-  from: v.pipe(v.number(), v.finite()),
-  to: v.pipe(v.number(), v.finite()),
-  step: positive("a step above 0"),
+const declination = ranged(-90, 90, "a declination in [-90, 90] degrees");
+// The lengths of the frequencies an observation may have.
+const wavelength = ranged(3e-5, 299_792, "a wavelength in [0.00003, 299792] metres");
+export const pairSchema = record({
+  separationArcsec: angle("a separation"),
+  positionAngleDeg: v.optional(ranged(-360, 360, "a position angle in [-360, 360] degrees"), 0),
+  fluxRatio: v.optional(positive(1, "a flux ratio"), 1),
 });
-export const pairSchema = v.looseObject({
-  separationArcsec: positive("a separation above 0 arcsec"),
-  positionAngleDeg: v.optional(number(-360, 360, "a position angle in [-360, 360] degrees"), 0),
-  fluxRatio: v.optional(v.pipe(v.number(), v.finite(), v.gtValue(0), v.maxValue(1)), 1),
-});
-export const whenSchema = v.looseObject({
-  observation: v.optional(v.nullable(v.string()), null),
-  layouts: v.optional(v.nullable(v.array(v.string())), null),
-  declinationDeg: v.optional(rangeSchema),
-  wavelengthM: v.optional(rangeSchema),
+export const whenSchema = record({
+  observation: orNull(text(64)),
+  layouts: orNull(list(text(64), "a list of layout ids")),
+  declinationDeg: v.optional(record({ from: declination, to: declination, step: positive(180, "a step", "degrees") })),
+  wavelengthM: v.optional(record({ from: wavelength, to: wavelength, step: positive(299_792, "a step", "metres") })),
   pair: v.optional(pairSchema),
-  sidelobeRadiusArcsec: v.optional(positive("a radius above 0 arcsec")),
-  aboveElevationDeg: v.optional(number(-90, 90, "an elevation in [-90, 90] degrees")),
-  without: v.optional(v.picklist([1, 2])),
+  sidelobeRadiusArcsec: v.optional(angle("a radius")),
+  aboveElevationDeg: v.optional(elevation),
+  without: v.optional(oneOf([1, 2])),
 });
-export const requirementSchema = v.looseObject({
+const limit = orNull(v.pipe(v.number("a number"), v.finite("a finite number")));
+export const requirementSchema = record({
   id,
   text: v.optional(label, ""),
-  quantity: v.pipe(v.string(), v.minLength(1), v.maxLength(100)),
-  atMost: v.optional(v.nullable(v.pipe(v.number(), v.finite())), null),
-  atLeast: v.optional(v.nullable(v.pipe(v.number(), v.finite())), null),
-  margin: v.optional(number(0, 1, "a margin in [0, 1]"), 0.05),
+  quantity: v.pipe(text(100), v.minLength(1, "a quantity such as beam.majorArcsec")),
+  atMost: limit,
+  atLeast: limit,
+  margin: v.optional(ranged(0, 1, "a margin in [0, 1]"), 0.05),
   when: v.optional(whenSchema, {}),
 });
 
-export const siteSchema = v.looseObject({
-  origin: v.looseObject({ latitudeDeg: latitude, longitudeDeg: longitude, heightM: v.optional(height, 0) }),
-  hub: v.optional(v.nullable(v.looseObject({ latitudeDeg: latitude, longitudeDeg: longitude })), null),
-  allowed: v.optional(v.nullable(geometrySchema), null),
-  keepOut: v.optional(v.array(v.looseObject({ label: v.optional(label, ""), geometry: geometrySchema })), []),
-  maxSlopeDeg: v.optional(v.nullable(number(0, 90, "a slope in [0, 90] degrees")), null),
-  clearanceM: v.optional(number(0, 1e6, "a clearance in [0, 1000000] metres"), 0),
+export const siteSchema = record({
+  origin: record({ latitudeDeg: latitude, longitudeDeg: longitude, heightM: v.optional(height, 0) }),
+  hub: orNull(record({ latitudeDeg: latitude, longitudeDeg: longitude })),
+  allowed: orNull(geometrySchema),
+  keepOut: v.optional(list(record({ label: v.optional(label, ""), geometry: geometrySchema }), "a list of areas"), []),
+  maxSlopeDeg: orNull(ranged(0, 90, "a slope in [0, 90] degrees")),
+  clearanceM: v.optional(ranged(0, 1e6, "a clearance in [0, 1000000] metres"), 0),
   costAreas: v.optional(
-    v.array(v.looseObject({ label: v.optional(label, ""), factor: positive("a factor above 0"), geometry: geometrySchema })),
+    list(record({ label: v.optional(label, ""), factor: positive(1e6, "a factor"), geometry: geometrySchema }), "a list of areas"),
     [],
   ),
-  prices: v.optional(
-    v.nullable(
-      v.looseObject({
-        currency: v.optional(v.pipe(v.string(), v.maxLength(10)), "EUR"),
-        trenchPerKm: v.optional(number(0, 1e12, "a price of 0 or more"), 0),
-        padEach: v.optional(number(0, 1e12, "a price of 0 or more"), 0),
-      }),
-    ),
-    null,
+  prices: orNull(
+    record({
+      currency: v.optional(text(10), "EUR"),
+      trenchPerKm: v.optional(price, 0),
+      padEach: v.optional(price, 0),
+    }),
   ),
-  terrain: v.optional(
-    v.nullable(
-      v.looseObject({
-        file: v.pipe(v.string(), v.maxLength(500)),
-        sha256: v.optional(v.nullable(v.pipe(v.string(), v.regex(/^[0-9a-f]{64}$/, "64 hexadecimal digits"))), null),
-        undulationM: v.optional(number(-200, 200, "an undulation in [-200, 200] metres"), 0),
-      }),
-    ),
-    null,
+  terrain: orNull(
+    record({
+      file: v.pipe(text(500), v.minLength(1, "the name of a file")),
+      sha256: orNull(v.pipe(v.string("64 hexadecimal digits"), v.regex(/^[0-9a-f]{64}$/, "64 hexadecimal digits in lower case"))),
+      undulationM: v.optional(ranged(-200, 200, "an undulation in [-200, 200] metres"), 0),
+    }),
   ),
 });
 
-export const planSchema = v.looseObject({
+export const planSchema = record({
   format: v.literal(FORMAT),
   version: v.literal(VERSION),
   title: v.optional(label, ""),
-  notes: v.optional(v.pipe(v.string(), v.maxLength(100_000)), ""),
-  savedUtc: v.optional(v.nullable(v.string()), null),
+  notes: v.optional(text(100_000), ""),
+  savedUtc: orNull(utc),
   site: siteSchema,
-  antennas: v.pipe(v.array(antennaSchema), v.minLength(1, "at least one antenna kind")),
-  stations: v.pipe(v.array(stationSchema), v.minLength(1, "at least one station"), v.maxLength(4096, "at most 4096 stations")),
-  layouts: v.pipe(v.array(layoutSchema), v.minLength(1, "at least one layout")),
-  observations: v.pipe(v.array(observationSchema), v.minLength(1, "at least one observation")),
-  requirements: v.optional(v.array(requirementSchema), []),
+  antennas: v.pipe(list(antennaSchema, "a list of antenna kinds"), v.minLength(1, "at least one antenna kind")),
+  stations: v.pipe(
+    list(stationSchema, "a list of stations"),
+    v.minLength(1, "at least one station"),
+    v.maxLength(MOST_STATIONS, `at most ${MOST_STATIONS} stations`),
+  ),
+  layouts: v.pipe(list(layoutSchema, "a list of layouts"), v.minLength(1, "at least one layout")),
+  observations: v.pipe(list(observationSchema, "a list of observations"), v.minLength(1, "at least one observation")),
+  requirements: v.optional(list(requirementSchema, "a list of requirements"), []),
 });
 
 /** A plan with every default filled in. Records are treated as frozen: edits make new ones. */
@@ -186,3 +199,10 @@ export type Observation = v.InferOutput<typeof observationSchema>;
 export type Requirement = v.InferOutput<typeof requirementSchema>;
 export type Pair = v.InferOutput<typeof pairSchema>;
 export type Geometry = v.InferOutput<typeof geometrySchema>;
+
+/** The pattern of a timestamp lets February have 31 days. */
+function isRealDate(text: string): boolean {
+  const [year, month, day] = text.slice(0, 10).split("-").map(Number);
+  const date = new Date(Date.UTC(year, month - 1, day));
+  return date.getUTCMonth() === month - 1 && date.getUTCDate() === day;
+}

@@ -1,4 +1,5 @@
 import { PlanFaults } from "./faults.ts";
+import { jsonFault } from "./jsonfault.ts";
 
 /** Largest plan file, bytes. */
 export const MOST_BYTES = 64 * 1024 * 1024;
@@ -23,7 +24,9 @@ export function parseJson(text: string): unknown {
   try {
     return JSON.parse(body);
   } catch (error) {
-    return fault(`not JSON: ${place(body, error as Error)}`, "a JSON document");
+    const wrong = jsonFault(body);
+    if (!wrong) throw error;
+    return fault(`not JSON: ${place(body, wrong.offset)}`, wrong.expected);
   }
 }
 
@@ -48,10 +51,10 @@ function nesting(text: string): number {
   return deepest;
 }
 
-/** Line and column where the parser stopped; engines word their messages differently, and some give no position. */
-function place(text: string, error: Error): string {
-  const position = /position (\d+)/.exec(error.message)?.[1];
-  if (position === undefined) return error.message;
-  const before = text.slice(0, Number(position)).split("\n");
-  return `line ${before.length}, column ${before[before.length - 1].length + 1}`;
+/** "line 2, column 15, at \",\"", or "…, where it ends". Columns count characters from 1. */
+function place(text: string, offset: number): string {
+  const before = text.slice(0, offset).split(/\r\n|\n|\r/);
+  const here = text.codePointAt(offset);
+  const at = here === undefined ? "where it ends" : `at ${JSON.stringify(String.fromCodePoint(here))}`;
+  return `line ${before.length}, column ${[...before[before.length - 1]].length + 1}, ${at}`;
 }

@@ -1,49 +1,48 @@
-import { planSchema } from "./schema.ts";
+import { entryOf, planShape, type Shape, shapeOf } from "./shape.ts";
 
 /** Keys named in a warning; the rest are counted. */
 const NAMED = 20;
 
-/** What this walk needs to know of a schema node. */
-interface Node {
-  readonly type: string;
-  readonly entries?: { readonly [key: string]: Node };
-  readonly item?: Node;
-  readonly wrapped?: Node;
-  readonly pipe?: readonly Node[];
-  readonly options?: readonly Node[];
-}
+/** Keys that no object of a plan keeps: a program that sets them on an object changes what the object is. */
+const DROPPED: ReadonlySet<string> = new Set(["__proto__", "prototype", "constructor"]);
 
-/** A warning that names the keys of a document which the plan's schema does not know; none when there are none. */
+/** Warnings that name the keys of a document which the plan's schema does not know; none when there are none. */
 export function unknownKeys(document: unknown): string[] {
   const found: string[] = [];
-  walk(document, planSchema as unknown as Node, "", found);
-  if (found.length === 0) return [];
-  const rest = found.length > NAMED ? ` and ${found.length - NAMED} more` : "";
-  return [`keys that are not known are kept as they are: ${found.slice(0, NAMED).join(", ")}${rest}`];
+  walk(document, planShape, "", found);
+  const dropped = found.filter((path) => DROPPED.has(path.slice(path.lastIndexOf(".") + 1)));
+  const kept = found.filter((path) => !dropped.includes(path));
+  return [
+    ...(kept.length > 0 ? [`keys that are not known are kept as they are: ${listed(kept)}`] : []),
+    ...(dropped.length > 0 ? [`keys that no plan can have are left out: ${listed(dropped)}`] : []),
+  ];
 }
 
-function walk(value: unknown, schema: Node | undefined, path: string, found: string[]): void {
-  const node = bare(schema);
-  if (!node || value === null || typeof value !== "object") return;
+function listed(paths: readonly string[]): string {
+  const rest = paths.length > NAMED ? ` and ${paths.length - NAMED} more` : "";
+  return paths.slice(0, NAMED).map(oneLine).join(", ") + rest;
+}
+
+/** A key may hold anything at all: on one line, and cut short. */
+function oneLine(path: string): string {
+  const text = /[\p{C}\p{Z}"]/u.test(path) ? JSON.stringify(path) : path;
+  return text.length > 120 ? `${text.slice(0, 117)}…` : text;
+}
+
+function walk(value: unknown, schema: Shape | undefined, path: string, found: string[]): void {
+  if (value === null || typeof value !== "object") return;
+  const shape = shapeOf(value, schema);
   if (Array.isArray(value)) {
     // Positions of a polygon have no keys, and there may be many.
-    if (bare(node.item)?.type === "number") return;
-    for (const [k, item] of value.entries()) walk(item, node.item, `${path}[${k}]`, found);
+    if (!shape?.item || shape.item.type === "number") return;
+    for (const [k, item] of value.entries()) walk(item, shape.item, `${path}[${k}]`, found);
     return;
   }
-  if (node.options) return;
+  if (!shape?.entries) return;
   for (const [key, inner] of Object.entries(value)) {
-    const known = node.entries && Object.hasOwn(node.entries, key) ? node.entries[key] : undefined;
+    const known = entryOf(shape, key);
     const at = path === "" ? key : `${path}.${key}`;
     if (known) walk(inner, known, at, found);
-    else if (node.entries) found.push(at);
+    else found.push(at);
   }
-}
-
-/** A node without its optional, nullable and pipe wrappings. */
-function bare(node: Node | undefined): Node | undefined {
-  if (!node) return undefined;
-  if (node.wrapped) return bare(node.wrapped);
-  if (node.pipe && node.pipe[0] !== node) return bare(node.pipe[0]);
-  return node;
 }

@@ -1,6 +1,8 @@
-import { expect, it } from "vitest";
+import { it } from "vitest";
+import type { OutsideCheck } from "./check.ts";
+import { testOf } from "./section.ts";
 
-/** One row of a data file: a quantity somebody else has computed or published. */
+/** One row of a data file whose figures and tolerance stand as its source words them. */
 export interface OutsideRow {
   readonly id: string;
   readonly quantity: string;
@@ -28,23 +30,17 @@ export function compare(
   answers: { readonly [id: string]: Answer },
   left: { readonly [id: string]: string },
 ): void {
-  it("has an answer, or a reason why not, for every row", () => {
+  it("has an answer, or a reason why not, for every row", ({ expect }) => {
     const known = [...Object.keys(answers), ...Object.keys(left)];
     expect(known.sort()).toEqual(rows.map((row) => row.id).sort());
   });
-  for (const row of rows) {
-    const answer = answers[row.id];
-    if (!answer) continue;
-    it(`${row.id} ${row.quantity} (${row.status}: ${row.source}; within ${row.tolerance}: ${answer.why})`, () => {
-      const theirs = answer.theirs ?? figures(row.numeric);
-      const ours = answer.ours();
-      expect(ours.length).toBe(theirs.length);
-      for (const [k, x] of ours.entries()) {
-        const within = typeof answer.within === "number" ? answer.within : answer.within[k];
-        expect(Math.abs(x - theirs[k]), `figure ${k}: ours ${x}, theirs ${theirs[k]}`).toBeLessThanOrEqual(within);
-      }
-    });
-  }
+  for (const row of rows) if (answers[row.id]) testOf(checkOf(row, answers[row.id]));
+}
+
+/** The check that a row and its answer make. */
+export function checkOf({ id, quantity, numeric, source, status, confirmed }: OutsideRow, answer: Answer): OutsideCheck {
+  const { ours, theirs, within: tolerance, why: toleranceReason } = answer;
+  return { id, quantity, expected: theirs ?? figures(numeric), tolerance, toleranceReason, source, status, confirmed, ours };
 }
 
 function figures(numeric: OutsideRow["numeric"]): readonly number[] {

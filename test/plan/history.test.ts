@@ -1,72 +1,77 @@
+import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { addStation, changeObservation, changeStation, moveStation, removeStation, renamePlan } from "../../src/plan/edits.ts";
-import { layoutById, observationById, stationById } from "../../src/plan/find.ts";
-import { begin, canRedo, canUndo, record, redo, redoLabel, undo, undoLabel } from "../../src/plan/history.ts";
-import { readPlan } from "../../src/plan/read.ts";
+import { moveStation, renamePlan } from "../../src/plan/edits.ts";
+import { begin, canRedo, canUndo, type History, record, redo, redoLabel, undo, undoLabel } from "../../src/plan/history.ts";
+import type { Plan } from "../../src/plan/schema.ts";
+import { read } from "./small.ts";
 
-const { plan } = readPlan(
-  JSON.stringify({
-    format: "spanwright-plan",
-    version: 1,
-    site: { origin: { latitudeDeg: 10, longitudeDeg: 20 } },
-    antennas: [{ id: "a", diameterM: 6 }],
-    stations: ["P", "Q"].map((id) => ({ id, latitudeDeg: 10, longitudeDeg: 20, heightM: 55, antenna: "a" })),
-    layouts: [
-      { id: "both", stations: ["P", "Q"] },
-      { id: "lone", stations: ["Q"] },
-    ],
-    observations: [{ id: "o", declinationDeg: 0, hourAngle: { fromH: -1, toH: 1 }, frequencyHz: 1e9 }],
-  }),
-);
-
-describe("D7 edits make new plans and leave the old one as it was", () => {
-  it("moves a station, keeping its height", () => {
-    const moved = moveStation(plan, "P", { latitudeDeg: 10.1, longitudeDeg: 20.2 });
-    expect(stationById(moved, "P")).toMatchObject({ latitudeDeg: 10.1, longitudeDeg: 20.2, heightM: 55 });
-    expect(stationById(plan, "P").latitudeDeg).toBe(10);
-    expect(moved.stations[1]).toBe(plan.stations[1]);
-  });
-
-  it("changes, adds, removes, renames", () => {
-    expect(stationById(changeStation(plan, "Q", { locked: true }), "Q").locked).toBe(true);
-    expect(observationById(changeObservation(plan, "o", { declinationDeg: 5 }), "o").declinationDeg).toBe(5);
-    const added = addStation(plan, "lone", { ...plan.stations[0], id: "R" });
-    expect(layoutById(added, "lone").stations).toEqual(["Q", "R"]);
-    const removed = removeStation(plan, "Q");
-    expect(removed.stations.map((s) => s.id)).toEqual(["P"]);
-    expect(removed.layouts.map((l) => l.id)).toEqual(["both"]); // a layout of nothing is none
-    expect(renamePlan(plan, "New").title).toBe("New");
-  });
-
-  it("names what exists when asked for what does not", () => {
-    expect(() => moveStation(plan, "Z", { latitudeDeg: 0, longitudeDeg: 0 })).toThrow('station is "Z"; expected one of P, Q.');
-    expect(() => layoutById(plan, "wide")).toThrow('layout is "wide"; expected one of both, lone.');
-  });
-});
+const { plan } = read(() => {});
+const renamed = (history: History, title: string): Plan => renamePlan(history.present, title);
+const moved = (history: History, latitudeDeg: number): Plan =>
+  moveStation(history.present, "K1", { latitudeDeg, longitudeDeg: 20 });
 
 describe("D8 undo takes back one named step; a drag is one step", () => {
-  it("undoes and redoes, and a new step forgets what was undone", () => {
-    const first = record(begin(plan), "Rename", renamePlan(plan, "One"));
-    const second = record(first, "Rename again", renamePlan(first.present, "Two"));
-    expect(undoLabel(second)).toBe("Rename again");
+  it("undoes and redoes by name, and a new step forgets what was undone", () => {
+    const first = record(begin(plan), "rename", renamePlan(plan, "One"));
+    const second = record(first, "rename again", renamed(first, "Two"));
+    expect(undoLabel(second)).toBe("rename again");
     const back = undo(second);
-    expect([back.present.title, redoLabel(back), canRedo(back)]).toEqual(["One", "Rename again", true]);
-    expect(redo(back).present.title).toBe("Two");
-    expect(canRedo(record(back, "Third", renamePlan(back.present, "Three")))).toBe(false);
+    expect([back.present.title, undoLabel(back), redoLabel(back), canRedo(back)]).toEqual(["One", "rename", "rename again", true]);
+    expect(redo(back)).toEqual(second);
+    expect(canRedo(record(back, "third", renamed(back, "Three")))).toBe(false);
     expect(undo(undo(second)).present).toBe(plan);
-    const start = begin(plan);
-    expect([undo(start), redo(start), canUndo(start)]).toEqual([start, start, false]);
   });
 
-  it("joins steps of one key, and records nothing for no change", () => {
-    let history = begin(plan);
-    for (const lat of [10.1, 10.2, 10.3]) {
-      history = record(history, "Move P", moveStation(history.present, "P", { latitudeDeg: lat, longitudeDeg: 20 }), "drag 1");
-    }
-    expect(history.past.length).toBe(1);
-    expect(undo(history).present).toBe(plan);
-    expect(record(history, "Nothing", history.present)).toBe(history);
-    const other = record(history, "Move P", moveStation(history.present, "P", { latitudeDeg: 11, longitudeDeg: 20 }), "drag 2");
-    expect(other.past.length).toBe(2);
+  it("has nothing to do at either end", () => {
+    const start = begin(plan);
+    expect([undo(start), redo(start)]).toEqual([start, start]);
+    expect([canUndo(start), canRedo(start), undoLabel(start), redoLabel(start)]).toEqual([false, false, undefined, undefined]);
+  });
+
+  it("records nothing where nothing changed", () => {
+    const start = begin(plan);
+    expect(record(start, "nothing", plan)).toBe(start);
+  });
+
+  it("joins steps in a row of one key, under the last one's name", () => {
+    let history = record(begin(plan), "rename", renamePlan(plan, "One"));
+    for (const lat of [10.1, 10.2, 10.3]) history = record(history, `move K1 to ${lat}`, moved(history, lat), "drag 1");
+    expect([history.past.length, undoLabel(history)]).toEqual([2, "move K1 to 10.3"]);
+    expect(undo(history).present.title).toBe("One");
+    expect(undo(history).present.stations).toBe(plan.stations);
+    expect(redo(undo(history)).present.stations[0].latitudeDeg).toBe(10.3);
+  });
+
+  it("does not join another key, none, or a step that was undone", () => {
+    const one = record(begin(plan), "move", moved(begin(plan), 11), "drag 1");
+    expect(record(one, "move", moved(one, 12), "drag 2").past.length).toBe(2);
+    expect(record(one, "move", moved(one, 12)).past.length).toBe(2);
+    const unkeyed = record(begin(plan), "move", moved(begin(plan), 11));
+    expect(record(unkeyed, "move", moved(unkeyed, 12)).past.length).toBe(2);
+    const two = record(one, "rename", renamed(one, "x"));
+    const back = undo(two);
+    const next = record(back, "move", moved(back, 12), "drag 1");
+    expect([next.past.length, next.past[0]]).toEqual([2, one.past[0]]);
+  });
+
+  it("comes back to every plan it went through", () => {
+    fc.assert(
+      fc.property(fc.array(fc.tuple(fc.string({ maxLength: 5 }), fc.constantFrom(null, "a", "b")), { maxLength: 20 }), (steps) => {
+        let history = begin(plan);
+        for (const [title, key] of steps) history = record(history, title, renamed(history, title), key);
+        const seen = [history.present];
+        while (canUndo(history)) {
+          history = undo(history);
+          seen.push(history.present);
+        }
+        expect(history.present).toBe(plan);
+        for (let k = seen.length - 2; k >= 0; k--) {
+          history = redo(history);
+          expect(history.present).toBe(seen[k]);
+        }
+        expect(canRedo(history)).toBe(false);
+      }),
+      { seed: 20260101 },
+    );
   });
 });

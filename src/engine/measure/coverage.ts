@@ -27,11 +27,15 @@ export function coverage(density: DensityGrid, longestWavelengths: number): Cove
   const cells = new Float64Array(SECTORS);
   const row = 2 * reach + 1;
   const limit = radius * radius;
+  const edges = Array.from({ length: SECTORS - 1 }, (_, k) => (Math.PI * (k + 1)) / SECTORS);
+  const cosEdge = Float64Array.from(edges, Math.cos);
+  const sinEdge = Float64Array.from(edges, Math.sin);
   for (let ku = 0; ku <= radius; ku++) {
     const span = Math.floor(Math.sqrt(limit - ku * ku));
-    for (let kv = ku === 0 ? 1 : -span; kv <= span; kv++) {
-      // From +v round through +u to −v: half a turn.
-      const sector = Math.min(SECTORS - 1, Math.floor((Math.atan2(ku, kv) / Math.PI) * SECTORS));
+    // Down a column the direction runs from +v round through +u to −v, half a turn, so that sectors come in order.
+    let sector = 0;
+    for (let kv = span; kv >= (ku === 0 ? 1 : -span); kv--) {
+      while (sector < SECTORS - 1 && ku * cosEdge[sector] >= kv * sinEdge[sector]) sector++;
       cells[sector]++;
       if (weight[row * ku + kv + reach] > 0) filled[sector]++;
     }

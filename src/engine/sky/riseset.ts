@@ -1,4 +1,6 @@
-/** How long a source stays at or above an elevation: half the arc in radians of hour angle, or one of the two ends. */
+import { checkQuarter } from "./checks.ts";
+
+/** How long a source stays at or above an elevation: half its arc in radians of hour angle, or one of the two extremes. */
 export type HalfArc =
   | { readonly kind: "rises"; readonly halfArcRad: number }
   | { readonly kind: "always" }
@@ -7,17 +9,29 @@ export type HalfArc =
 /**
  * When a source is at or above an elevation: from −halfArc to +halfArc of hour angle at the station's own meridian.
  *
- * cos H = (sin e − sin φ sin δ)/(cos φ cos δ); no refraction. At a pole, or for a source at a pole, the elevation never
- * changes and one of the other kinds is returned.
+ * @param elevationRad - The limit, radians, [−π/2, π/2].
+ * @param decRad - Declination of date, radians, [−π/2, π/2].
+ * @param latRad - Geodetic latitude, radians, [−π/2, π/2].
+ * @returns `always` also where the lowest elevation just meets the limit; a half arc of 0 where the highest does. Where the
+ *   elevation never changes, at a pole or for a source at one, mostly `always` or `never`.
+ * @throws {@link DomainError} for an angle outside its range.
+ *
+ * cos H = (sin e − sin φ sin δ)/(cos φ cos δ), in the half-angle form: tan²(H/2) = (sin e₊ − sin e)/(sin e − sin e₋) with
+ * the elevations e₊, e₋ of the two culminations. The arccosine would lose half its digits where a source only grazes the
+ * limit. No refraction.
  */
 export function halfArcAbove(elevationRad: number, decRad: number, latRad: number): HalfArc {
-  const level = Math.sin(latRad) * Math.sin(decRad);
-  const swing = Math.cos(latRad) * Math.cos(decRad);
-  const wanted = Math.sin(elevationRad);
-  // Highest and lowest elevations by their own formula: sums of sines cancel where they touch the limit.
+  checkQuarter({ elevationRad, decRad, latRad });
   const highest = Math.PI / 2 - Math.abs(latRad - decRad);
   const lowest = Math.abs(latRad + decRad) - Math.PI / 2;
   if (elevationRad <= lowest) return { kind: "always" };
   if (elevationRad > highest) return { kind: "never" };
-  return { kind: "rises", halfArcRad: Math.acos(Math.min(1, Math.max(-1, (wanted - level) / swing))) };
+  const below = sineDifference(highest, elevationRad);
+  const above = sineDifference(elevationRad, lowest);
+  return { kind: "rises", halfArcRad: 2 * Math.atan2(Math.sqrt(below), Math.sqrt(above)) };
+}
+
+/** Half of sin a − sin b for π/2 ≥ a ≥ b ≥ −π/2, without its cancellation; never negative. */
+function sineDifference(a: number, b: number): number {
+  return Math.max(0, Math.sin((a - b) / 2) * Math.cos((a + b) / 2));
 }

@@ -1,0 +1,2 @@
+export declare function isInstalled(folder?: string): boolean;
+export declare function install(): Promise<number>;

@@ -1,0 +1,2 @@
+export declare const metaPolicy: string;
+export declare const securityHeaders: Readonly<Record<string, string>>;

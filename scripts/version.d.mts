@@ -1,0 +1,1 @@
+export declare const versionDefine: Record<string, string>;
