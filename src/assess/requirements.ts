@@ -93,9 +93,9 @@ async function judgeOne(line: Requirement, bench: Bench, checkpoint: Checkpoint)
     margin: null,
     note,
   });
-  if (line.atMost !== null && line.atLeast !== null) return cannot("a line with both limits is not judged yet: write two lines");
-  if (when.without) return cannot("the loss of stations is not computed yet");
-  if (when.aboveElevationDeg !== undefined) return cannot("hours above an elevation are not computed yet");
+  if (line.atMost !== null && line.atLeast !== null) return cannot("not judged yet with both limits: write two lines");
+  if (when.without) return cannot("not computed yet: the loss of stations");
+  if (when.aboveElevationDeg !== undefined) return cannot("not computed yet: hours above an elevation");
   const observations = bench.plan.observations.map((o) => o.id).filter((id) => !when.observation || id === when.observation);
   if (observations.length === 0) return cannot(`the plan has no observation ${when.observation}`);
   const points = rangePoints(line);
@@ -109,7 +109,7 @@ async function judgeOne(line: Requirement, bench: Bench, checkpoint: Checkpoint)
       );
       done++;
       const value = judgedValue(result, line.quantity);
-      if (value === undefined) return cannot(`${line.quantity} is not a quantity that is computed yet`, observation);
+      if (value === undefined) return cannot(`not computed yet: ${line.quantity}`, observation);
       if (value === null) return cannot(reasonFor(result, line.quantity, point), observation);
       if (!worst || (sense === "atMost" ? value > worst.value : value < worst.value)) worst = { value, observation, point };
     }

@@ -37,9 +37,14 @@ async function start(): Promise<void> {
 /** Hash, look and keys go with the session, and the session with them. */
 function followSession(store: Store): void {
   window.addEventListener("hashchange", () => store.look({ task: taskOfHash() }));
-  matchMedia("(prefers-color-scheme: dark)").addEventListener("change", ({ matches }) => {
-    if (!isThemeChosen()) store.look({ theme: matches ? "dark" : "light" });
-  });
+  let bySystem = false;
+  const followSystem = (): void => {
+    if (isThemeChosen()) return;
+    bySystem = true;
+    store.look({ theme: startingTheme() });
+    bySystem = false;
+  };
+  matchMedia("(prefers-color-scheme: dark)").addEventListener("change", followSystem);
   let before = store.shown.session;
   store.subscribe(() => {
     const { session, plan } = store.shown;
@@ -48,11 +53,12 @@ function followSession(store: Store): void {
     if (session.task !== before.task && taskOfHash() !== session.task) location.hash = session.task;
     if (session.theme !== before.theme) {
       root.dataset.theme = session.theme;
-      keepTheme(session.theme);
+      if (!bySystem) keepTheme(session.theme);
     }
     if (session.keys !== before.keys) keepKeys(session.keys);
     before = session;
   });
+  followSystem(); // it may have changed while the plan was on its way
 }
 
 /** Opening by the button and by dropping a file on the page; saving as a download. */

@@ -10,9 +10,22 @@ import type { Plan } from "./schema.ts";
  *
  * @param document - A plan, or as much of one as could be made out: fields of a wrong type are passed over, since their own
  *   fault is told already.
+ * @param most - No more than this many are looked for.
  */
-export function crossFaults(document: unknown): Fault[] {
-  return [...doubleIds(document), ...namesNowhere(document), ...rangeFaults(document), ...ringFaults(document)];
+export function crossFaults(document: unknown, most: number): Fault[] {
+  const faults: Fault[] = [];
+  for (const fault of allFaults(document)) {
+    if (faults.length >= most) break;
+    faults.push(fault);
+  }
+  return faults;
+}
+
+function* allFaults(document: unknown): Generator<Fault> {
+  yield* doubleIds(document);
+  yield* namesNowhere(document);
+  yield* rangeFaults(document);
+  yield* ringFaults(document);
 }
 
 /** A requirement may outlive the observation or layout it names: it stays in the ledger and says so. */
@@ -33,47 +46,43 @@ export function crossWarnings(plan: Plan): string[] {
   return warnings;
 }
 
-function doubleIds(document: unknown): Fault[] {
-  const faults: Fault[] = [];
+function* doubleIds(document: unknown): Generator<Fault> {
   for (const list of ["antennas", "stations", "layouts", "observations", "requirements"]) {
     const first = new Map<string, string>();
     for (const [path, { id }] of rows(document, list)) {
       if (typeof id !== "string") continue;
       const before = first.get(id);
       if (before === undefined) first.set(id, path);
-      else faults.push({ path: `${path}.id`, value: id, expected: `an id that no other has; ${before} has it` });
+      else yield { path: `${path}.id`, value: id, expected: `an id that no other has; ${before} has it` };
     }
   }
-  return faults;
 }
 
-function namesNowhere(document: unknown): Fault[] {
-  const faults: Fault[] = [];
+function* namesNowhere(document: unknown): Generator<Fault> {
   const antennas = idsOf(document, "antennas");
   for (const [path, { antenna }] of rows(document, "stations")) {
     if (typeof antenna === "string" && antennas.size > 0 && !antennas.has(antenna)) {
-      faults.push({ path: `${path}.antenna`, value: antenna, expected: `one of ${someOf([...antennas])}` });
+      yield { path: `${path}.antenna`, value: antenna, expected: `one of ${someOf([...antennas])}` };
     }
   }
   const stations = idsOf(document, "stations");
-  for (const [path, layout] of rows(document, "layouts")) faults.push(...listedFaults(path, layout, stations));
-  return faults;
+  for (const [path, layout] of rows(document, "layouts")) yield* listedFaults(path, layout, stations);
 }
 
-function listedFaults(layoutPath: string, layout: Row, stations: ReadonlySet<string>): Fault[] {
-  if (!Array.isArray(layout.stations)) return [];
-  const faults: Fault[] = [];
+function* listedFaults(layoutPath: string, layout: Row, stations: ReadonlySet<string>): Generator<Fault> {
+  if (!Array.isArray(layout.stations)) return;
   const listed = new Set<string>();
   for (const [k, id] of layout.stations.entries()) {
     if (typeof id !== "string") continue;
     const path = `${layoutPath}.stations[${k}]`;
-    if (listed.has(id)) faults.push({ path, value: id, expected: "each station once" });
-    else if (!stations.has(id)) faults.push({ path, value: id, expected: "the id of a station of the plan" });
+    if (listed.has(id)) yield { path, value: id, expected: "each station once" };
+    else if (!stations.has(id)) yield { path, value: id, expected: "the id of a station of the plan" };
     listed.add(id);
   }
-  return faults;
 }
 
 function idsOf(document: unknown, list: string): ReadonlySet<string> {
-  return new Set(rows(document, list).flatMap(([, { id }]) => (typeof id === "string" ? [id] : [])));
+  const ids = new Set<string>();
+  for (const [, { id }] of rows(document, list)) if (typeof id === "string") ids.add(id);
+  return ids;
 }

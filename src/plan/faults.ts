@@ -12,6 +12,8 @@ export interface Fault {
 
 /** Faults named in full; the rest are counted. */
 const NAMED = 50;
+/** Faults looked for: a file of 64 MiB may have millions, and no one reads them. */
+export const MOST_FAULTS = 1000;
 
 /** A plan that cannot be read, with all that is wrong with it. */
 export class PlanFaults extends Error {
@@ -29,7 +31,7 @@ export function faultLines(faults: readonly Fault[]): string[] {
   const lines = faults
     .slice(0, NAMED)
     .map(({ path, value, found, expected }) => `${path || "the plan"} is ${found ?? shown(value)}; expected ${expected}.`);
-  return faults.length > NAMED
-    ? [...lines, `… and ${faults.length - NAMED} more fault${faults.length === NAMED + 1 ? "" : "s"}.`]
-    : lines;
+  if (faults.length <= NAMED) return lines;
+  const rest = faults.length - NAMED;
+  return [...lines, `… and ${faults.length >= MOST_FAULTS ? "at least " : ""}${rest} more fault${rest === 1 ? "" : "s"}.`];
 }

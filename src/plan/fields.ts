@@ -1,4 +1,5 @@
 import * as v from "valibot";
+import { MOST_FAULTS } from "./faults.ts";
 
 /*
  * The kinds of field a plan has. Each says in words what it allows, once, and gives the same words for every way of being wrong:
@@ -31,7 +32,27 @@ export function text(most: number) {
 export const oneOf = <const T extends readonly (string | number)[]>(values: T) =>
   v.picklist(values, values.map((value) => JSON.stringify(value)).join(" or "));
 
-export const list = <T extends v.GenericSchema>(item: T, what: string) => v.array(item, what);
+/** A list of anything but plain numbers. Once there are as many faults as are looked for, the rest of it is not looked at. */
+export function list<T extends v.GenericSchema>(item: T, what: string) {
+  const schema = v.array(item, what);
+  type Run = (typeof schema)["~run"];
+  const run: Run = (dataset, config) => {
+    const given = dataset.value;
+    if (!Array.isArray(given)) return schema["~run"](dataset, config);
+    const items: unknown[] = [];
+    const issues: v.BaseIssue<unknown>[] = [];
+    let typed = true;
+    for (let key = 0; key < given.length && issues.length < MOST_FAULTS; key++) {
+      const one = item["~run"]({ value: given[key] }, config);
+      const at = { type: "array", origin: "value", input: given, key, value: given[key] } as const;
+      for (const issue of one.issues ?? []) issues.push({ ...issue, path: [at, ...(issue.path ?? [])] });
+      typed &&= one.typed === true;
+      items.push(one.value);
+    }
+    return { typed, value: items, issues: issues.length > 0 ? issues : undefined } as ReturnType<Run>;
+  };
+  return { ...schema, "~run": run };
+}
 
 /** Something that may be null or left out, which is the same: the program chooses. */
 export const orNull = <T extends v.GenericSchema>(schema: T) => v.optional(v.nullable(schema), null);

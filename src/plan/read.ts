@@ -1,6 +1,6 @@
 import * as v from "valibot";
 import { crossFaults, crossWarnings } from "./cross.ts";
-import { PlanFaults } from "./faults.ts";
+import { MOST_FAULTS, PlanFaults } from "./faults.ts";
 import { issueFault } from "./issue.ts";
 import { migrated } from "./migrate.ts";
 import { type Plan, planSchema } from "./schema.ts";
@@ -27,7 +27,8 @@ export function checkedPlan(document: unknown): ReadPlan {
   // One place has one fault: what is not finite is not also told to be out of range.
   const result = v.safeParse(planSchema, current, { abortPipeEarly: true });
   // Where a field is wrong the output still holds the others, with defaults: what is wrong between fields is told as well.
-  const faults = [...(result.issues ?? []).map(issueFault), ...crossFaults(result.output)];
+  const single = (result.issues ?? []).map(issueFault);
+  const faults = [...single, ...crossFaults(result.output, MOST_FAULTS - single.length)];
   if (!result.success || faults.length > 0) throw new PlanFaults(faults);
   return { plan: result.output, warnings: [...unknownKeys(current), ...crossWarnings(result.output)] };
 }

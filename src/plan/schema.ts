@@ -28,7 +28,7 @@ const utc = v.pipe(
 
 /** GeoJSON polygons (RFC 7946): rings of [longitude, latitude] in degrees, closed. */
 const position = v.pipe(
-  list(v.pipe(v.number("a number of degrees"), v.finite("a finite number of degrees")), "a position: longitude, latitude"),
+  v.array(v.pipe(v.number("a number of degrees"), v.finite("a finite number of degrees")), "a position: longitude, latitude"),
   v.minLength(2, "two or three numbers: longitude, latitude and perhaps height"),
   v.maxLength(3, "two or three numbers: longitude, latitude and perhaps height"),
 );
@@ -79,7 +79,11 @@ export const stationSchema = record({
 export const layoutSchema = record({
   id,
   label: v.optional(label, ""),
-  stations: v.pipe(list(id, "a list of station ids"), v.minLength(1, "at least one station")),
+  stations: v.pipe(
+    list(id, "a list of station ids"),
+    v.minLength(1, "at least one station"),
+    v.maxLength(MOST_STATIONS, `at most ${MOST_STATIONS} stations`),
+  ),
 });
 
 export const weightingSchema = record({

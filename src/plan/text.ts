@@ -51,10 +51,18 @@ function nesting(text: string): number {
   return deepest;
 }
 
-/** "line 2, column 15, at \",\"", or "…, where it ends". Columns count characters from 1. */
+/** `line 2, column 15, at ","`, or `…, where it ends`. Columns count characters from 1. */
 function place(text: string, offset: number): string {
-  const before = text.slice(0, offset).split(/\r\n|\n|\r/);
+  let line = 1;
+  let column = 1;
+  for (let k = 0; k < offset; k++) {
+    const c = text.charCodeAt(k);
+    if (c === 10 || (c === 13 && text.charCodeAt(k + 1) !== 10)) {
+      line++;
+      column = 1;
+    } else if (c !== 13 && (c & 0xfc00) !== 0xdc00) column++; // the second half of a surrogate pair is no character of its own
+  }
   const here = text.codePointAt(offset);
   const at = here === undefined ? "where it ends" : `at ${JSON.stringify(String.fromCodePoint(here))}`;
-  return `line ${before.length}, column ${[...before[before.length - 1]].length + 1}, ${at}`;
+  return `line ${line}, column ${column}, ${at}`;
 }

@@ -8,19 +8,26 @@ const DROPPED: ReadonlySet<string> = new Set(["__proto__", "prototype", "constru
 
 /** Warnings that name the keys of a document which the plan's schema does not know; none when there are none. */
 export function unknownKeys(document: unknown): string[] {
-  const found: string[] = [];
-  walk(document, planShape, "", found);
-  const dropped = found.filter((path) => DROPPED.has(path.slice(path.lastIndexOf(".") + 1)));
-  const kept = found.filter((path) => !dropped.includes(path));
+  const [kept, dropped] = [new Found(), new Found()];
+  walk(document, planShape, "", (path, key) => (DROPPED.has(key) ? dropped : kept).add(path));
   return [
-    ...(kept.length > 0 ? [`keys that are not known are kept as they are: ${listed(kept)}`] : []),
-    ...(dropped.length > 0 ? [`keys that no plan can have are left out: ${listed(dropped)}`] : []),
+    ...(kept.count > 0 ? [`keys that are not known are kept as they are: ${kept.text()}`] : []),
+    ...(dropped.count > 0 ? [`keys that no plan can have are left out: ${dropped.text()}`] : []),
   ];
 }
 
-function listed(paths: readonly string[]): string {
-  const rest = paths.length > NAMED ? ` and ${paths.length - NAMED} more` : "";
-  return paths.slice(0, NAMED).map(oneLine).join(", ") + rest;
+/** The first few paths, and a count of all: a large file may have millions. */
+class Found {
+  count = 0;
+  private readonly named: string[] = [];
+
+  add(path: string): void {
+    if (this.count++ < NAMED) this.named.push(oneLine(path));
+  }
+
+  text(): string {
+    return this.named.join(", ") + (this.count > NAMED ? ` and ${this.count - NAMED} more` : "");
+  }
 }
 
 /** A key may hold anything at all: on one line, and cut short. */
@@ -29,7 +36,7 @@ function oneLine(path: string): string {
   return text.length > 120 ? `${text.slice(0, 117)}…` : text;
 }
 
-function walk(value: unknown, schema: Shape | undefined, path: string, found: string[]): void {
+function walk(value: unknown, schema: Shape | undefined, path: string, found: (path: string, key: string) => void): void {
   if (value === null || typeof value !== "object") return;
   const shape = shapeOf(value, schema);
   if (Array.isArray(value)) {
@@ -43,6 +50,6 @@ function walk(value: unknown, schema: Shape | undefined, path: string, found: st
     const known = entryOf(shape, key);
     const at = path === "" ? key : `${path}.${key}`;
     if (known) walk(inner, known, at, found);
-    else found.push(at);
+    else found(at, key);
   }
 }

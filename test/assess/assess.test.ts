@@ -328,7 +328,7 @@ describe("requirements", () => {
       outcomes[8].state,
       "cannot be computed",
     ]);
-    expect(outcomes[4].note).toBe("beam.colour is not a quantity that is computed yet");
+    expect(outcomes[4].note).toBe("not computed yet: beam.colour");
     expect(outcomes[6].note).toBe("the plan has no observation gone");
     expect(outcomes[7]).toMatchObject({ value: 0, margin: -1 });
     expect(outcomes[8].note).toMatch(/^worst at declination (-60|-20|20)°$/);

@@ -3,7 +3,7 @@ import { createRequire } from "node:module";
 import type { AxeResults } from "axe-core";
 import { describe, expect, it } from "vitest";
 import { type StartedPage, startPage } from "./harness.ts";
-import { settled } from "./support.ts";
+import { read, settled } from "./support.ts";
 
 const axe = readFileSync(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
 
@@ -78,7 +78,7 @@ describe("the keyboard", () => {
       await page.keyboard.press("i");
       await page.keyboard.press("i");
       expect(await picked()).toBe("R9");
-      expect(await page.locator("sw-ledger .foot h3").innerText()).toBe("Trench");
+      expect(await read(page.locator("sw-ledger .foot h3"))).toBe("Trench");
     } finally {
       await started.close();
     }

@@ -2,7 +2,7 @@ import { readFileSync } from "node:fs";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import type { App } from "../../src/screen/shell/app.ts";
 import { type StartedPage, startPage } from "./harness.ts";
-import { figure, line, pickedPoint, settled } from "./support.ts";
+import { figure, line, pickedPoint, read, settled } from "./support.ts";
 
 const IRIS_LIGHT = [0x4a, 0x3f, 0xc4] as const;
 
@@ -34,7 +34,7 @@ describe("the page at work", () => {
     expect(held).toContain(", was 1.");
     expect(await line(page, "R5")).toContain("Working, last value shown");
     await page.mouse.up();
-    expect(await page.locator("sw-toast").innerText()).toMatch(/^Moved High Latch \d+(\.\d+)?\u00a0km\./);
+    expect(await read(page.locator("sw-toast"))).toMatch(/^Moved High Latch \d+(\.\d+)? km\./);
     await settled(started);
     const after = await line(page, "R1");
     expect(after).not.toContain("was");
@@ -81,7 +81,7 @@ describe("the page at work", () => {
     const field = declination.locator("input");
     await field.fill("190");
     await field.press("Enter");
-    expect(await declination.getByRole("alert").innerText()).toMatch(/^declination is "190"; expected /);
+    expect(await read(declination.getByRole("alert"))).toMatch(/^declination is "190"; expected /);
     expect(await field.getAttribute("aria-invalid")).toBe("true");
     expect(await page.evaluate(() => (document.querySelector("sw-app") as App).store?.plan.observations[0].declinationDeg)).toBe(
       10,
@@ -146,19 +146,19 @@ describe("the page at work", () => {
     await panel.getByLabel("Separation").fill("0.8");
     await panel.getByLabel("Separation").press("Enter");
     await settled(started);
-    expect(await panel.locator(".verdict").innerText()).toContain("Blended");
+    expect(await read(panel.locator(".verdict"))).toContain("Blended");
     await panel.getByLabel("Separation").fill("6");
     await panel.getByLabel("Separation").press("Enter");
     await settled(started);
-    expect(await panel.locator(".verdict").innerText()).toContain("Resolved");
+    expect(await read(panel.locator(".verdict"))).toContain("Resolved");
   });
 
   it("reads what lies under the pointer", async () => {
     const { page } = started;
     await page.locator("sw-beam-panel .square").hover();
-    expect(await page.locator("sw-beam-panel header .aside").innerText()).toMatch(/″ [EW], .*″ [NS]: \S+ % of peak$/);
+    expect(await read(page.locator("sw-beam-panel header .aside"))).toMatch(/″ [EW], .*″ [NS]: \S+ % of peak$/);
     await page.locator("sw-uv-panel .square").hover({ position: { x: 40, y: 40 } });
-    expect(await page.locator("sw-uv-panel header .aside:not([hidden])").innerText()).toMatch(/^u \u2212.* kλ is a .* spacing$/);
+    expect(await read(page.locator("sw-uv-panel header .aside:not([hidden])"))).toMatch(/^u \u2212.* kλ is a .* spacing$/);
   });
 
   it("sees another layout and another observation", async () => {
@@ -177,9 +177,9 @@ describe("the page at work", () => {
     await page.keyboard.press("Escape");
     await page.locator("h1").click();
     await page.keyboard.press("3");
-    expect(await page.locator("main h2").innerText()).toBe("Compare is not built yet");
+    expect(await read(page.locator("main h2"))).toBe("Compare is not built yet");
     await page.keyboard.press("4");
-    expect(await page.locator("main h2").innerText()).toBe("Report is not built yet");
+    expect(await read(page.locator("main h2"))).toBe("Report is not built yet");
     await page.keyboard.press("1");
     expect(await page.locator("sw-place").count()).toBe(1);
   });
@@ -219,7 +219,7 @@ describe("plan files", () => {
     expect(saved.savedUtc).toMatch(/^\d{4}-\d\d-\d\dT.*Z$/);
     await open("again.plan.json", text);
     await settled(started);
-    expect(await page.locator("sw-toast").innerText()).toContain("Opened Thistledown Array.");
+    expect(await read(page.locator("sw-toast"))).toContain("Opened Thistledown Array.");
   });
 
   it("lists every fault of a file that cannot be opened, and keeps the plan that is open", async () => {
@@ -264,7 +264,7 @@ describe("without WebGL", () => {
     try {
       expect(await started.page.evaluate(() => document.createElement("canvas").getContext("webgl2"))).toBeNull();
       await settled(started);
-      expect(await started.page.locator("sw-beam-panel header").innerText()).toMatch(/1\.\d\d″ × 1\.\d\d″/);
+      expect(await read(started.page.locator("sw-beam-panel header"))).toMatch(/1\.\d\d″ × 1\.\d\d″/);
       expect([...started.consoleErrors, ...started.pageErrors]).toEqual([]);
     } finally {
       await started.close();

@@ -1,5 +1,5 @@
 import { decode } from "fast-png";
-import type { Page } from "playwright-core";
+import type { Locator, Page } from "playwright-core";
 import type { App } from "../../src/screen/shell/app.ts";
 import type { StartedPage } from "./harness.ts";
 
@@ -18,15 +18,17 @@ export async function settled({ page }: StartedPage): Promise<void> {
   );
 }
 
-/** A line of the ledger as it reads, spaces and breaks made one space. */
-export async function line(page: Page, id: string): Promise<string> {
-  return (await page.locator(`[data-line="${id}"]`).innerText()).replace(/\s+/g, " ").trim();
+/** What an element shows, spaces and breaks made one space. */
+export async function read(locator: Locator): Promise<string> {
+  return (await locator.allInnerTexts()).join(" ").replace(/\s+/g, " ").trim();
 }
+
+/** A line of the ledger as it reads. */
+export const line = (page: Page, id: string): Promise<string> => read(page.locator(`[data-line="${id}"]`));
 
 /** The figure a line shows. */
 export async function figure(page: Page, id: string): Promise<number> {
-  const text = await page.locator(`[data-line="${id}"] .value`).innerText();
-  return Number.parseFloat(text.replace("\u2212", "-"));
+  return Number.parseFloat((await read(page.locator(`[data-line="${id}"] .value`))).replace("\u2212", "-"));
 }
 
 /**

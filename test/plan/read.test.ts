@@ -448,6 +448,23 @@ describe("D2 every fault of a file is listed, with its path, the value found and
     expect(read(put("stations", stations(4096))).plan.stations.length).toBe(4096);
   });
 
+  it("looks for a thousand faults and no more, so that a large file of nothing else is refused in time and space", () => {
+    const lines = (change: (plan: Loose) => void): string[] => {
+      const told = faults(change);
+      expect(told.length).toBe(51);
+      expect(told[50]).toBe("… and at least 950 more faults.");
+      return told;
+    };
+    const many = <T>(value: T): T[] => Array.from({ length: 200_000 }, () => value);
+    expect(lines(put("stations", many(0)))[49]).toBe("stations[49] is 0; expected an object.");
+    expect(lines(put("layouts", [{ id: "l", stations: many("K1") }]))[0]).toBe(
+      "layouts[0].stations is a list of 200000; expected at most 4096 stations.",
+    );
+    expect(lines(put("site.allowed", square(many([]))))[0]).toMatch(/^site.allowed.coordinates\[0\] is empty/);
+    expect(lines(put("site.keepOut", many({})))[0]).toMatch(/^site.keepOut\[0\].geometry is missing/);
+    expect(lines(put("requirements", many(line({})[0])))[0]).toMatch(/^requirements\[1\].id is "R1"/);
+  });
+
   it("whatever stands in the place of a field, the plan is read or refused in lines", () => {
     const paths: string[] = [];
     const walk = (node: Loose, path: string): void => {
@@ -510,6 +527,11 @@ describe("D3 what is no plan is refused in one line", () => {
     ],
     ["100 000 nested brackets", "[".repeat(100_000), "the file is nested 100000 deep; expected at most 64 levels of brackets."],
     ["100 000 nested objects", '{"a":'.repeat(100_000), "the file is nested 100000 deep; expected at most 64 levels of brackets."],
+    [
+      "a fault after a wide character and a line of Windows",
+      '{"title": "𝔎",\r\n "notes": "𝔎𝔎" 5}',
+      'the file is not JSON: line 2, column 16, at "5"; expected a comma or }.',
+    ],
     ["a list", "[1, 2]", 'the plan is [1,2]; expected an object with "format": "spanwright-plan".'],
     ["null", "null", 'the plan is null; expected an object with "format": "spanwright-plan".'],
     ["a number", "5", 'the plan is 5; expected an object with "format": "spanwright-plan".'],

@@ -30,7 +30,7 @@ function holds({ type, coordinates }: Geometry, { longitudeDeg: x, latitudeDeg: 
 const ecefM = ({ latitudeDeg, longitudeDeg, heightM }: Station) =>
   geodeticToEcef((latitudeDeg * Math.PI) / 180, (longitudeDeg * Math.PI) / 180, heightM);
 
-describe("a scenario", () => {
+describe("D10 a scenario", () => {
   it.each(NAMES)("%s is read without fault or warning", (name) => {
     expect(readPlan(readFileSync(`scenarios/${name}.plan.json`, "utf8")).warnings).toEqual([]);
   });
