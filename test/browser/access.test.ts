@@ -65,6 +65,20 @@ describe("the keyboard", () => {
     }
   });
 
+  it("shows the cautions", async () => {
+    const started = await startPage();
+    try {
+      const { page } = started;
+      await settled(started);
+      await page.getByRole("button", { name: "Cautions" }).click();
+      const cautions = page.getByRole("dialog", { name: "Cautions" });
+      expect(await cautions.textContent()).toContain("licensed practice and local codes");
+      expect(await violations(started)).toEqual([]);
+    } finally {
+      await started.close();
+    }
+  });
+
   it("walks the ledger with J and I, and shows the line that is picked", async () => {
     const started = await startPage();
     try {

@@ -55,6 +55,7 @@ export class Ledger extends LitElement {
     const picked = ledger.lines.find((line) => line.id === selected);
     return html`<div class="head">
         <h2>Ledger</h2>
+        ${ledger.open > 0 ? html`<span class="open" title="The lines say why">${ledger.open} not computed</span>` : nothing}
         <div class="tally">${this.#tally(ledger)}</div>
         <div class="scale" aria-hidden="true">
           <i></i><span class="short-side">short</span><span class="hand">in hand</span><span class="five">5</span

@@ -22,6 +22,14 @@ export const ledgerStyles = css`
     font-size: 15px;
     line-height: 18px;
   }
+  .head .open {
+    position: absolute;
+    left: 76px;
+    top: 27px;
+    font-size: 11px;
+    line-height: 18px;
+    color: var(--sw-ink-3);
+  }
   .tally {
     display: flex;
     gap: 9px;
@@ -305,6 +313,9 @@ export const ledgerStyles = css`
       height: 76px;
       padding-top: 24px;
     }
+    .head .open {
+      top: 25px;
+    }
     .condition {
       display: none;
     }
@@ -342,6 +353,7 @@ export const ledgerStyles = css`
       font-size: 13px;
     }
     .tally,
+    .head .open,
     .scale span,
     .state .brief {
       display: none;

@@ -1,5 +1,5 @@
 import { css, html, LitElement, nothing, type PropertyValues } from "lit";
-import { type Camera, pannedCamera, zoomedCamera } from "../../view/ground/camera.ts";
+import { pannedCamera, zoomedCamera } from "../../view/ground/camera.ts";
 import { fittedCamera } from "../../view/ground/fit.ts";
 import { floatingAt } from "../../view/ground/floating.ts";
 import type { GroundPoint } from "../../view/ground/frame.ts";
@@ -7,7 +7,7 @@ import { type MapCommand, mapCommand } from "../../view/ground/keys.ts";
 import { type CallOut, callOut, type Lift, lifted, liftedBy, liftedTo, placeText } from "../../view/ground/lift.ts";
 import { extentOf, type PlaceModel, type PlaceStation, titleOf } from "../../view/ground/model.ts";
 import { nearestPoint, pointInDirection, type ScreenPoints } from "../../view/ground/pick.ts";
-import { drawnPoints, type Sheet, sheetFor } from "../../view/ground/sheet.ts";
+import { type Camera, drawnPoints, type Sheet, sheetFor } from "../../view/ground/sheet.ts";
 import { props } from "../parts/props.ts";
 import { base, panes } from "../shared.ts";
 import type { Theme } from "../tokens.ts";

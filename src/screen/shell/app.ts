@@ -4,6 +4,7 @@ import { inverse } from "../../engine/geodesy/geodesic.ts";
 import { changeObservation, moveStation } from "../../plan/edits.ts";
 import { stationById } from "../../plan/find.ts";
 import type { Pair } from "../../plan/schema.ts";
+import { CAUTIONS } from "../../view/cautions.ts";
 import { type PlaceModel, placeModel } from "../../view/ground/model.ts";
 import { topBarModel, unbuilt } from "../../view/shell.ts";
 import { shownAs } from "../../view/units.ts";
@@ -99,7 +100,7 @@ export class App extends LitElement {
         @toast-over=${() => store.hush()}
         @toast-action=${(event: CustomEvent<{ action: "undo" | "redo" }>) => (event.detail.action === "undo" ? store.undo() : store.redo())}
       ></sw-toast>
-      ${this.#keyList(session.keys)}
+      ${this.#keyList(session.keys)} ${cautionList}
       <div class="unseen" aria-live="polite">${shown.announced}</div>`;
   }
 
@@ -130,7 +131,7 @@ export class App extends LitElement {
   }
 
   #keyList(on: boolean) {
-    return html`<div class="keys float" id="keys" popover role="dialog" aria-label="Keys">
+    return html`<div class="sheet keys float" id="keys" popover role="dialog" aria-label="Keys">
       <header><h2>Keys</h2><button class="button" popovertarget="keys" popovertargetaction="hide">Close</button></header>
       <dl>${KEY_LIST.map(([key, does]) => html`<dt>${key}</dt><dd>${does}</dd>`)}</dl>
       <label><input type="checkbox" .checked=${on} @change=${(event: Event) => this.store?.look({ keys: (event.target as HTMLInputElement).checked })} />Single-letter keys</label>
@@ -145,7 +146,7 @@ export class App extends LitElement {
     else if (name === "undo") store.undo();
     else if (name === "redo") store.redo();
     else if (name === "theme") store.look({ theme: store.shown.session.theme === "light" ? "dark" : "light" });
-    else if (name === "keys") this.renderRoot.querySelector<HTMLElement>("#keys")?.togglePopover();
+    else if (name === "keys" || name === "cautions") this.renderRoot.querySelector<HTMLElement>(`#${name}`)?.togglePopover();
   }
 
   readonly #key = (event: KeyboardEvent): void => {
@@ -237,6 +238,11 @@ export class App extends LitElement {
     this.store?.look({ pair: event.detail.pair });
   }
 }
+
+const cautionList = html`<div class="sheet cautions float" id="cautions" popover role="dialog" aria-label="Cautions">
+  <header><h2>Cautions</h2><button class="button" popovertarget="cautions" popovertargetaction="hide">Close</button></header>
+  <ul>${CAUTIONS.map((caution) => html`<li>${caution}</li>`)}</ul>
+</div>`;
 
 /** A key press that belongs to a field, a list or a slider. */
 function takesText(event: KeyboardEvent): boolean {

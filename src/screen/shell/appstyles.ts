@@ -61,7 +61,7 @@ export const appStyles = css`
         color: var(--sw-ink-2);
         overflow-wrap: anywhere;
       }
-      .keys {
+      .sheet {
         inset: 56px 16px auto auto;
         position: fixed;
         margin: 0;
@@ -72,11 +72,11 @@ export const appStyles = css`
         padding: 12px 16px 16px;
         color: inherit;
       }
-      .keys header {
+      .sheet header {
         display: flex;
         align-items: center;
       }
-      .keys header .button {
+      .sheet header .button {
         margin-left: auto;
       }
       .keys dl {
@@ -101,6 +101,15 @@ export const appStyles = css`
         accent-color: var(--sw-ink);
         width: 16px;
         height: 16px;
+      }
+      .cautions ul {
+        margin: 8px 0 0;
+        padding-left: 16px;
+        color: var(--sw-ink-2);
+        line-height: 18px;
+      }
+      .cautions li + li {
+        margin-top: 6px;
       }
       .drop {
         position: absolute;

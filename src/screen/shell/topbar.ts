@@ -10,7 +10,7 @@ const names: { readonly [T in TaskName]: string } = { place: "Place", resolve: "
  * Wordmark, plan, task switch and the actions that hold everywhere.
  *
  * @fires layout-choose - `detail.id`.
- * @fires command - `detail.name`: "open", "save", "undo", "redo", "theme" or "keys".
+ * @fires command - `detail.name`: "open", "save", "undo", "redo", "theme", "keys" or "cautions".
  */
 export class TopBar extends LitElement {
   static override properties = { model: { attribute: false } };
@@ -162,7 +162,10 @@ export class TopBar extends LitElement {
       }
       @media (max-width: 1360px) {
         nav a {
-          padding: 0 15px;
+          padding: 0 13px;
+        }
+        .tools kbd {
+          display: none;
         }
         .layout select {
           max-width: 200px;
@@ -214,6 +217,7 @@ export class TopBar extends LitElement {
         ${this.#button("undo", "Undo", "Z", model.undo ? `Undo: ${model.undo}` : null, "Nothing to undo")}
         ${this.#button("redo", "Redo", "⇧Z", model.redo ? `Redo: ${model.redo}` : null, "Nothing to redo", "wide")}
         ${this.#button("keys", "Keys", "?", "List of keys", undefined, "wide")}
+        ${this.#button("cautions", "Cautions", "", "What a plan does not settle")}
         ${this.#button("theme", model.otherTheme, "", `Change to the ${model.otherTheme.toLowerCase()} look`)}
       </div>`;
   }

@@ -1,10 +1,5 @@
 import type { GeoPoint } from "./frame.ts";
-import type { Sheet } from "./sheet.ts";
-
-/** Where the map looks: the place in its middle, and metres on the ground a CSS pixel there. */
-export interface Camera extends GeoPoint {
-  readonly metresPerPx: number;
-}
+import type { Camera, Sheet } from "./sheet.ts";
 
 /** From 5 mm to 60 km a pixel: a 10 m patch to the whole Earth fit any screen. */
 const CLOSEST = 0.005;

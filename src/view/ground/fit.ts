@@ -1,7 +1,6 @@
 import { shortWay } from "./areas.ts";
-import type { Camera } from "./camera.ts";
 import type { GeoPoint, GroundPoint, LocalFrame } from "./frame.ts";
-import { angleBetween, EARTH_RADIUS_M } from "./sheet.ts";
+import { angleBetween, type Camera, EARTH_RADIUS_M } from "./sheet.ts";
 
 const DEG = 180 / Math.PI;
 /** Past this angle from the middle a station stands too near the globe's edge to be worked with. */

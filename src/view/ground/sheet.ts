@@ -1,7 +1,11 @@
 import { type GeoProjection, geoNaturalEarth1, geoOrthographic } from "d3-geo";
-import type { Camera } from "./camera.ts";
 import type { GeoPoint, GroundPoint, LocalFrame } from "./frame.ts";
 import type { ScreenPoints } from "./pick.ts";
+
+/** Where the map looks: the place in its middle, and metres on the ground a CSS pixel there. */
+export interface Camera extends GeoPoint {
+  readonly metresPerPx: number;
+}
 
 /**
  * How the ground lies on the screen for one camera and canvas size.

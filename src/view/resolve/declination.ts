@@ -77,7 +77,9 @@ export function declinationModel(
   const first = shape[0];
   const middle = shape[Math.floor(shape.length * 0.62)];
   const limitY = limitArcsec === null ? null : y(limitArcsec);
-  const clear = (wanted: number): number => (limitY !== null && Math.abs(wanted - 4 - limitY) < 11 ? limitY - 8 : wanted);
+  // The name stands over the curve as near the middle as the limit's line leaves it room.
+  const roomy = (k: number): boolean => limitY === null || Math.abs(value(majors)(k) - 12 - limitY) >= 12;
+  const named = [...shape].sort((a, b) => Math.abs(a - middle) - Math.abs(b - middle)).find(roomy) ?? middle;
   return {
     box,
     xTicks: [-90, -60, -30, 0, 30, 60, 90].map((d) => ({ at: x(d), label: `${plain(d)}°` })),
@@ -92,7 +94,7 @@ export function declinationModel(
       first === undefined
         ? []
         : [
-            { x: at(middle), y: clear(value(majors)(middle) - 8), text: "major", kind: "major" },
+            { x: at(named), y: value(majors)(named) - 8, text: "major", kind: "major" },
             { x: at(middle), y: value(minors)(middle) + 14, text: "minor", kind: "minor" },
           ],
     never: neverUp(points, has, x),
@@ -103,7 +105,7 @@ export function declinationModel(
     },
     limit:
       limitArcsec === null ? null : { y: y(limitArcsec), text: `limit ${withUnit(limitArcsec, unitFor("angle", limitArcsec))}` },
-    aside: `window ${windowText(observation)}`,
+    aside: tracksText(observation),
     text: {
       summary: `Beam against declination for a window of ${windowText(observation)}: major axis from ${shownAs("angle", sorted[0])} to ${shownAs("angle", sorted[sorted.length - 1])} where the source is up.`,
       columns: ["Declination", "Major axis", "Minor axis"],
@@ -111,6 +113,10 @@ export function declinationModel(
     },
   };
 }
+
+/** Where the source is up for less than the window, its track is shorter. */
+const tracksText = ({ hourAngle: { fromH, toH } }: Observation): string =>
+  toH > fromH ? `up to ${plain(toH - fromH)}\u00a0h` : "snapshots";
 
 /** Runs of points without a beam; each reaches half way to its neighbour that has one. */
 function neverUp(points: readonly SweepPoint[], has: readonly boolean[], x: (deg: number) => number): DeclinationModel["never"] {
