@@ -58,7 +58,9 @@ function followSession(store: Store): void {
     if (session.keys !== before.keys) keepKeys(session.keys);
     before = session;
   });
-  followSystem(); // it may have changed while the plan was on its way
+  // Either may have changed while the plan was on its way.
+  root.dataset.theme = before.theme;
+  followSystem();
 }
 
 /** Opening by the button and by dropping a file on the page; saving as a download. */

@@ -34,7 +34,8 @@ describe("the page at work", () => {
     expect(held).toContain(", was 1.");
     expect(await line(page, "R5")).toContain("Working, last value shown");
     await page.mouse.up();
-    expect(await read(page.locator("sw-toast"))).toMatch(/^Moved High Latch \d+(\.\d+)? km\./);
+    await page.locator("sw-toast .toast").waitFor();
+    expect(await read(page.locator("sw-toast .toast"))).toMatch(/^Moved High Latch \d+(\.\d+)? km\./);
     await settled(started);
     const after = await line(page, "R1");
     expect(after).not.toContain("was");
@@ -66,7 +67,7 @@ describe("the page at work", () => {
     const { page } = started;
     const before = await figure(page, "R2");
     await page.keyboard.press("s");
-    await page.waitForFunction(() => location.hash === "#resolve");
+    await page.locator('[data-part="declination"] input:focus').waitFor();
     await page.keyboard.type("+10d");
     await page.keyboard.press("Enter");
     await settled(started);
@@ -163,11 +164,13 @@ describe("the page at work", () => {
 
   it("sees another layout and another observation", async () => {
     const { page } = started;
+    await page.locator("h1").click();
+    await page.keyboard.press("2");
     const before = await line(page, "R1");
-    await page.getByLabel("Layout").selectOption({ label: "Ring and core" });
+    await page.getByLabel("Layout", { exact: true }).selectOption({ label: "Ring and core" });
     await settled(started);
     expect(await line(page, "R1")).not.toBe(before);
-    await page.getByLabel("Observation", { exact: true }).selectOption({ index: 1 });
+    await page.locator("sw-ledger").getByLabel("Observation", { exact: true }).selectOption({ index: 1 });
     await settled(started);
     expect(await page.locator('[data-part="declination"] input').inputValue()).toBe("+15° 00′ 00″");
   });
@@ -219,7 +222,7 @@ describe("plan files", () => {
     expect(saved.savedUtc).toMatch(/^\d{4}-\d\d-\d\dT.*Z$/);
     await open("again.plan.json", text);
     await settled(started);
-    expect(await read(page.locator("sw-toast"))).toContain("Opened Thistledown Array.");
+    expect(await read(page.locator("sw-toast .toast"))).toContain("Opened Thistledown Array.");
   });
 
   it("lists every fault of a file that cannot be opened, and keeps the plan that is open", async () => {

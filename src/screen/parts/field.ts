@@ -50,9 +50,13 @@ export class Field extends LitElement {
     `,
   ];
 
+  /** Puts the keyboard on the field, once it is there. */
   override focus(): void {
-    this.#input?.focus();
+    void this.updateComplete.then(() => this.#input?.focus());
   }
+
+  /** Where the caret goes when the stepped value comes back, characters from the end. */
+  #caretFromEnd: number | null = null;
 
   get #input(): HTMLInputElement | null {
     return this.renderRoot.querySelector("input");
@@ -89,7 +93,9 @@ export class Field extends LitElement {
       ${this.fault ? html`<span class="fault" id="fault" role="alert">${this.fault}</span>` : nothing}`;
   }
 
-  override updated(): void {
+  override updated(changed: Map<string, unknown>): void {
+    const before = changed.get("model") as FieldModel<unknown> | undefined;
+    if (before && before.text !== this.model?.text) this.#keepCaret();
     this.style.setProperty("--sw-width", String(this.model?.width ?? 6));
   }
 
@@ -121,12 +127,18 @@ export class Field extends LitElement {
     if (size === undefined) return;
     const fromEnd = input.value.length - caret;
     const next = this.model.value + (event.key === "ArrowUp" ? size : -size);
+    this.#caretFromEnd = fromEnd;
     // Rounded so that repeated steps do not gather the rest of a binary fraction.
-    if (!this.#send(Number(next.toPrecision(12)), true)) return;
-    void this.updateComplete.then(() => {
-      const place = Math.max(0, input.value.length - fromEnd);
-      input.setSelectionRange(place, place);
-    });
+    if (!this.#send(Number(next.toPrecision(12)), true)) this.#caretFromEnd = null;
+  }
+
+  /** The new text would put the caret at its end; it stays at the digit that is stepped. */
+  #keepCaret(): void {
+    const input = this.#input;
+    if (!input || this.#caretFromEnd === null) return;
+    const place = Math.max(0, input.value.length - this.#caretFromEnd);
+    this.#caretFromEnd = null;
+    input.setSelectionRange(place, place);
   }
 
   #commit(): void {

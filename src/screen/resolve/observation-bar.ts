@@ -123,9 +123,9 @@ export class ObservationBar extends LitElement {
     `,
   ];
 
-  /** Puts the keyboard on the declination. */
+  /** Puts the keyboard on the declination, once it is there. */
   override focus(): void {
-    this.renderRoot.querySelector<HTMLElement>("sw-field")?.focus();
+    void this.updateComplete.then(() => this.renderRoot.querySelector<HTMLElement>("sw-field")?.focus());
   }
 
   override render() {

@@ -66,6 +66,8 @@ export class Resolve extends LitElement {
       @media (max-width: 1100px), (max-height: 640px) {
         :host {
           display: block;
+          /* What is out of sight but read aloud scrolls along. */
+          position: relative;
           overflow: auto;
         }
         .first,
