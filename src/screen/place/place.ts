@@ -1,11 +1,13 @@
 import { css, html, LitElement, nothing } from "lit";
 import type { Picture } from "../../assess/result.ts";
+import type { Observation, Plan } from "../../plan/schema.ts";
 import { ZOOM_STEP } from "../../view/ground/keys.ts";
 import type { PlaceModel } from "../../view/ground/model.ts";
 import { tally } from "../../view/ground/table.ts";
 import { base, buttons, keys, panes } from "../shared.ts";
 import type { Theme } from "../tokens.ts";
 import "./ground-map.ts";
+import type { SpaceView } from "../scene/scene.ts";
 import type { GroundMap } from "./ground-map.ts";
 import "./live-thumbnails.ts";
 import "./station-edit.ts";
@@ -45,8 +47,21 @@ export class Place extends LitElement {
         display: flex;
         gap: 4px;
       }
-      sw-ground-map {
+      sw-ground-map,
+      sw-space,
+      .loading {
         grid-area: 2 / 1;
+      }
+      .loading {
+        place-self: center;
+        color: var(--sw-ink-2);
+      }
+      .tools .why {
+        margin-left: 8px;
+        color: var(--sw-ink-2);
+        white-space: nowrap;
+        overflow: hidden;
+        text-overflow: ellipsis;
       }
       aside {
         grid-area: 1 / 2 / 3 / 3;
@@ -131,12 +146,22 @@ export class Place extends LitElement {
     model: { attribute: false },
     picture: { attribute: false },
     theme: { attribute: false },
+    plan: { attribute: false },
+    observation: { attribute: false },
+    space: { state: true },
+    why: { state: true },
     strip: { state: true },
     narrow: { state: true },
   };
   declare model?: PlaceModel;
   declare picture: Picture | null;
   declare theme: Theme;
+  declare plan?: Plan;
+  declare observation?: Observation;
+  /** The picture in space stands in the place of the map, or is on its way. */
+  declare space: "off" | "loading" | "on";
+  /** Why there is no picture in space. */
+  declare why: string;
   /** The panel is one line under the map. */
   declare strip: boolean;
   declare narrow: boolean;
@@ -151,6 +176,8 @@ export class Place extends LitElement {
     super();
     this.picture = null;
     this.theme = "light";
+    this.space = "off";
+    this.why = "";
     this.#measured();
   }
 
@@ -170,14 +197,35 @@ export class Place extends LitElement {
     return this.renderRoot.querySelector("sw-ground-map");
   }
 
-  /** Puts the keyboard on the map, where arrows pick and Enter lifts. */
-  focusMap(): void {
-    this.#map?.focus();
+  get #view(): GroundMap | SpaceView | null {
+    return this.space === "on" ? this.renderRoot.querySelector("sw-space") : this.#map;
   }
 
-  /** Shows the whole layout. */
-  fit(): void {
-    this.#map?.fit();
+  /** Puts the keyboard on the map, where arrows pick and Enter lifts. */
+  focusMap(): void {
+    this.space = "off";
+    void this.updateComplete.then(() => this.#map?.focus());
+  }
+
+  /** The picture in space and what it is drawn with come the first time they are asked for. */
+  async #toSpace(): Promise<void> {
+    if (!givesWebGl()) {
+      this.why = "This browser gives no WebGL, so the flat map stays.";
+      return;
+    }
+    this.space = "loading";
+    try {
+      await import("../scene/scene.ts");
+      // Meanwhile the map may have been asked for again.
+      if (this.space === "loading") this.space = "on";
+    } catch {
+      this.#stayFlat("The picture in space did not load, so the flat map stays.");
+    }
+  }
+
+  #stayFlat(why: string): void {
+    this.space = "off";
+    this.why = why;
   }
 
   override render() {
@@ -188,19 +236,39 @@ export class Place extends LitElement {
         <button
           class="button"
           type="button"
-          aria-pressed="true"
+          aria-pressed=${this.space === "off" ? "true" : "false"}
           title="Drag a station, or pick it with the arrow keys and lift it with Enter"
           @click=${() => this.focusMap()}
         >Move</button>
+        <button
+          class="button"
+          type="button"
+          aria-pressed=${this.space === "off" ? "false" : "true"}
+          title="The array in space, with the target over it"
+          @click=${() => void this.#toSpace()}
+        >In space</button>
+        <span class="why" role="status">${this.why}</span>
         <span class="view">
-          <button class="button" type="button" @click=${() => this.#map?.zoom(ZOOM_STEP)}>Closer <kbd>+</kbd></button>
-          <button class="button" type="button" @click=${() => this.#map?.zoom(1 / ZOOM_STEP)}>Farther <kbd>−</kbd></button>
-          <button class="button" type="button" @click=${() => this.fit()}>Whole layout <kbd>0</kbd></button>
+          <button class="button" type="button" @click=${() => this.#view?.zoom(ZOOM_STEP)}>Closer <kbd>+</kbd></button>
+          <button class="button" type="button" @click=${() => this.#view?.zoom(1 / ZOOM_STEP)}>Farther <kbd>−</kbd></button>
+          <button class="button" type="button" @click=${() => this.#view?.fit()}>Whole layout <kbd>0</kbd></button>
         </span>
       </div>
-      <sw-ground-map .model=${model} .theme=${theme}></sw-ground-map>
+      ${this.#picture(model, theme)}
       <aside aria-label="Stations">${this.strip ? this.#strip(model) : this.#panel(model)}</aside>
     `;
+  }
+
+  #picture(model: PlaceModel, theme: Theme) {
+    if (this.space === "loading") return html`<p class="loading">Getting the picture in space</p>`;
+    if (this.space === "off") return html`<sw-ground-map .model=${model} .theme=${theme}></sw-ground-map>`;
+    return html`<sw-space
+      .model=${model}
+      .plan=${this.plan}
+      .observation=${this.observation}
+      .theme=${theme}
+      @space-lost=${() => this.#stayFlat("The browser took the picture in space away, so the flat map is back.")}
+    ></sw-space>`;
   }
 
   #panel(model: PlaceModel) {
@@ -223,6 +291,8 @@ export class Place extends LitElement {
     return html`<sw-live-thumbnails .picture=${this.picture} .theme=${this.theme}></sw-live-thumbnails>`;
   }
 }
+
+const givesWebGl = (): boolean => document.createElement("canvas").getContext("webgl2") !== null;
 
 customElements.define("sw-place", Place);
 

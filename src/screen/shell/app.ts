@@ -2,7 +2,7 @@ import { html, LitElement, nothing } from "lit";
 import { DomainError } from "../../base/errors.ts";
 import { inverse } from "../../engine/geodesy/geodesic.ts";
 import { changeObservation, moveStation } from "../../plan/edits.ts";
-import { stationById } from "../../plan/find.ts";
+import { observationById, stationById } from "../../plan/find.ts";
 import type { Pair } from "../../plan/schema.ts";
 import { CAUTIONS } from "../../view/cautions.ts";
 import { type PlaceModel, placeModel } from "../../view/ground/model.ts";
@@ -109,7 +109,7 @@ export class App extends LitElement {
     switch (session.task) {
       case "place":
         this.#place = placeModel(plan, session.layout, session.station, shown.dragging, this.#place);
-        return html`<sw-place .model=${this.#place} .picture=${shown.picture} .theme=${session.theme}></sw-place>`;
+        return html`<sw-place .model=${this.#place} .plan=${plan} .observation=${observationById(plan, session.observation)} .picture=${shown.picture} .theme=${session.theme}></sw-place>`;
       case "resolve":
         return html`<sw-resolve .model=${resolveModel(shown)}></sw-resolve>`;
       default: {
