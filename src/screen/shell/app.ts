@@ -132,7 +132,7 @@ export class App extends LitElement {
 
   #keyList(on: boolean) {
     return html`<div class="sheet keys float" id="keys" popover role="dialog" aria-label="Keys">
-      <header><h2>Keys</h2><button class="button" popovertarget="keys" popovertargetaction="hide">Close</button></header>
+      <div class="top"><h2>Keys</h2><button class="button" popovertarget="keys" popovertargetaction="hide">Close</button></div>
       <dl>${KEY_LIST.map(([key, does]) => html`<dt>${key}</dt><dd>${does}</dd>`)}</dl>
       <label><input type="checkbox" .checked=${on} @change=${(event: Event) => this.store?.look({ keys: (event.target as HTMLInputElement).checked })} />Single-letter keys</label>
     </div>`;
@@ -240,7 +240,7 @@ export class App extends LitElement {
 }
 
 const cautionList = html`<div class="sheet cautions float" id="cautions" popover role="dialog" aria-label="Cautions">
-  <header><h2>Cautions</h2><button class="button" popovertarget="cautions" popovertargetaction="hide">Close</button></header>
+  <div class="top"><h2>Cautions</h2><button class="button" popovertarget="cautions" popovertargetaction="hide">Close</button></div>
   <ul>${CAUTIONS.map((caution) => html`<li>${caution}</li>`)}</ul>
 </div>`;
 

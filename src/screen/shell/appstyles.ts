@@ -72,11 +72,11 @@ export const appStyles = css`
         padding: 12px 16px 16px;
         color: inherit;
       }
-      .sheet header {
+      .sheet .top {
         display: flex;
         align-items: center;
       }
-      .sheet header .button {
+      .sheet .top .button {
         margin-left: auto;
       }
       .keys dl {
