@@ -22,6 +22,9 @@ export interface OutsideCheck extends OutsideRow {
   ours(): readonly Figure[];
 }
 
+/** Rows of a section that the program does not answer, and why. */
+export type Left = { readonly [id: string]: string };
+
 /** One figure of a check beside ours. */
 export interface Comparison {
   readonly ours: Figure;
