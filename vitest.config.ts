@@ -1,3 +1,4 @@
+import { fileURLToPath } from "node:url";
 import { defineConfig } from "vitest/config";
 import { versionDefine } from "./scripts/version.mjs";
 
@@ -9,6 +10,10 @@ const apart = { outside: "test/outside/**/*.test.ts", browser: "test/browser/**/
  */
 export default defineConfig({
   define: versionDefine,
+  // The examples import the library as a reader does.
+  resolve: {
+    alias: [{ find: /^spanwright\/(\w+)$/, replacement: fileURLToPath(new URL("./src/library/$1.ts", import.meta.url)) }],
+  },
   test: {
     // Ends what hangs, judges nothing: a busy machine may take many times what a quiet one does.
     testTimeout: 300_000,

@@ -5,4 +5,5 @@ export interface Part {
 }
 export declare const page: Part;
 export declare const terminal: Part;
+export declare const library: Part;
 export declare function isStale(part: Part): boolean;

@@ -13,6 +13,12 @@ export const page = {
 };
 export const terminal = { output: join(root, "dist/terminal/spanwright.js"), config: "vite.terminal.config.ts", inputs: shared };
 
+export const library = {
+  output: join(root, "dist/library/assess.js"),
+  config: "vite.library.config.ts",
+  inputs: [...shared, "scripts/library.mjs"],
+};
+
 /** Whether anything that goes into it (a file, or a folder something left) is newer than what was built. */
 export function isStale({ output, config, inputs }) {
   if (!existsSync(output)) return true;

@@ -4,7 +4,7 @@
  */
 import { mkdirSync, readFileSync, rmSync } from "node:fs";
 import { join } from "node:path";
-import { build, page, terminal } from "./built.mjs";
+import { build, library, page, terminal } from "./built.mjs";
 import { root, runNode } from "./node.mjs";
 import { tallyOf } from "./tally.mjs";
 
@@ -31,9 +31,12 @@ const steps = {
   types: () => runNode([bin("typescript/bin/tsc"), "-p", "."]),
   lint: () => runNode([bin("@biomejs/biome/bin/biome"), "check", "--error-on-warnings"]),
   "folder rules": () => runNode(["scripts/rules.mjs"]),
+  // Before the tests: some look at what was built.
+  build: async () => (await build(page)) || (await build(terminal)) || (await build(library)),
+  "library types": () => runNode([bin("typescript/bin/tsc"), "-p", "tsconfig.library.json"]),
+  "library docs": () => runNode([bin("typedoc/bin/typedoc"), "--logLevel", "Warn"]),
   "unit tests": () => vitest("unit"),
   "outside checks": () => vitest("outside"),
-  build: async () => (await build(page)) || (await build(terminal)),
   "page in a browser": () => vitest("browser"),
 };
 

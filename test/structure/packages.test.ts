@@ -4,17 +4,21 @@ import { describe, expect, it } from "vitest";
 import { importsOf, packageOf } from "./imports.ts";
 import { fileOf, root, sourcesIn } from "./sources.ts";
 
-const { dependencies, devDependencies } = JSON.parse(readFileSync(join(root, "package.json"), "utf8")) as Record<
+const {
+  name: own,
+  dependencies,
+  devDependencies,
+} = JSON.parse(readFileSync(join(root, "package.json"), "utf8")) as Record<
   "dependencies" | "devDependencies",
   Record<string, string>
->;
+> & { readonly name: string };
 
-/** Packages of path → its imports, Node's own left out. */
+/** Packages of path → its imports, Node's and the package's own left out. */
 const packagesOf = (folder: string) =>
   sourcesIn(folder).flatMap(({ path, imports }) =>
     imports.flatMap(({ specifier, typeOnly }) => {
       const name = fileOf(path, specifier) === undefined ? packageOf(specifier) : undefined;
-      return name === undefined || name === "node" ? [] : [{ path, name, typeOnly }];
+      return name === undefined || name === "node" || name === own ? [] : [{ path, name, typeOnly }];
     }),
   );
 

@@ -15,8 +15,10 @@ export interface GeodesicLine {
 /**
  * Distance and azimuths between two places, everywhere on the ellipsoid, nearly opposite places included.
  *
- * @param latADeg, latBDeg - Geodetic latitudes, degrees, [−90, 90].
- * @param lonADeg, lonBDeg - Longitudes, degrees, east positive, any finite value.
+ * @param latADeg - Geodetic latitudes, degrees, [−90, 90].
+ * @param latBDeg - Goes with latADeg.
+ * @param lonADeg - Longitudes, degrees, east positive, any finite value.
+ * @param lonBDeg - Goes with lonADeg.
  * @returns Azimuths of 0 for one and the same place, where they have no meaning.
  * @throws {@link DomainError} for a latitude past a pole or a value that is not finite.
  *

@@ -24,7 +24,8 @@ export function stationXyzM(ecefXyzM: Float64Array, originLonRad: number): Float
 /**
  * Unit normals of the ellipsoid at each station, in the frame of `stationXyzM`.
  *
- * @param latRad, lonRad - (N) geodetic latitudes and longitudes, radians.
+ * @param latRad - (N) geodetic latitudes and longitudes, radians.
+ * @param lonRad - Goes with latRad.
  * @returns (N, 3) row-major. A source stands at elevation e over station i where its direction · normal i = sin e.
  * @throws {@link DomainError} for arrays of unlike length or a longitude of the origin that is not finite.
  */

@@ -15,7 +15,9 @@ const FWHM_PER_SIGMA = Math.sqrt(8 * Math.LN2);
  * The Gaussian with the beam's curvature at its peak, from the second moments of the weighted uv distribution:
  * FWHM = √(8 ln 2)/(2π σ_uv) along each principal axis.
  *
- * @param uu, uv, vv - Mean of u², u·v and v², wavelengths².
+ * @param uu - Mean of u², u·v and v², wavelengths².
+ * @param uv - Goes with uu.
+ * @param vv - Goes with uu.
  * @returns Widths may be infinite: a line of samples has no width across it.
  */
 export function curvatureEllipse(uu: number, uv: number, vv: number): Ellipse {

@@ -16,7 +16,8 @@ export interface Equatorial {
  *
  * @param raRad - Mean right ascension of J2000, radians, any finite value.
  * @param decRad - Mean declination of J2000, radians, [−π/2, π/2].
- * @param ttDay, ttFrac - Julian date TT in two parts. UTC serves: precession moves 0.1 mas in the minute between them.
+ * @param ttDay - Julian date TT in two parts. UTC serves: precession moves 0.1 mas in the minute between them.
+ * @param ttFrac - Goes with ttDay.
  * @returns Mean place of date. Nutation and aberration (each < 0.01°), proper motion and the 23 mas between ICRS and
  *   mean J2000 axes are left out.
  * @throws {@link DomainError} for a declination past a pole or a value that is not finite.

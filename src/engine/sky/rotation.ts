@@ -6,8 +6,9 @@ const TURN = 2 * Math.PI;
 /**
  * Earth rotation angle, radians in [0, 2π).
  *
- * @param ut1Day, ut1Frac - Julian date UT1 in two parts, whose sum it is: one double resolves only 40 µs. Best kept are
+ * @param ut1Day - Julian date UT1 in two parts, whose sum it is: one double resolves only 40 µs. Best kept are
  *   digits with the first part at a midnight or noon and the second within a day. UTC serves within 0.9 s of time, 14″.
+ * @param ut1Frac - Goes with ut1Day.
  * @throws {@link DomainError} for a value that is not finite.
  *
  * Source: IAU 2000 Resolution B1.8: 2π(0.7790572732640 + 1.00273781191135448·(JD UT1 − 2451545.0)).
@@ -23,8 +24,10 @@ export function earthRotationAngle(ut1Day: number, ut1Frac: number): number {
 /**
  * Greenwich mean sidereal time by IAU 2006, radians in [0, 2π).
  *
- * @param ut1Day, ut1Frac - Julian date UT1 in two parts; UTC serves as for the Earth rotation angle.
- * @param ttDay, ttFrac - Terrestrial time. Left out, UT1 takes its place: 70 s apart, as now, that errs by 5e-10 rad.
+ * @param ut1Day - Julian date UT1 in two parts; UTC serves as for the Earth rotation angle.
+ * @param ut1Frac - Goes with ut1Day.
+ * @param ttDay - Terrestrial time. Left out, UT1 takes its place: 70 s apart, as now, that errs by 5e-10 rad.
+ * @param ttFrac - Goes with ttDay.
  * @throws {@link DomainError} for a value that is not finite.
  *
  * Source: Capitaine, Wallace & Chapront, Astron. Astrophys. 412 (2003) 567, eq. 42 (the equation's number from memory);

@@ -6,7 +6,8 @@ const BASELINES_A_BLOCK = 256;
 /**
  * Runs a step over all baselines in fixed blocks of first stations, in a fixed order whatever calls it.
  *
- * @param fromDone, toDone - The fractions of the whole job that this step covers, for the checkpoint.
+ * @param fromDone - The fractions of the whole job that this step covers, for the checkpoint.
+ * @param toDone - Goes with fromDone.
  */
 export async function inBlocks(
   stationCount: number,

@@ -38,7 +38,8 @@ export function planeReach(axes: PlaneAxes): number {
  * The beam between pixels by Lagrange's formula on 6 × 6 neighbours (Abramowitz & Stegun 1964, 25.2.6): its error for the
  * finest ripple that a beam of 6 pixels a FWHM carries is below 1e-4 of that ripple.
  *
- * @param x, y - Pixels from the centre, each within `planeReach`.
+ * @param x - Pixels from the centre, each within `planeReach`.
+ * @param y - Goes with x.
  */
 export function interpolate(plane: BeamPlane, x: number, y: number): number {
   const { size, values } = plane;

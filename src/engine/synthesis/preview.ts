@@ -45,7 +45,8 @@ export class PreviewGrid {
    * @param maxUvM - Largest |u| or |v| of the samples, metres; \`reachM\` is a little more, so that a station can move outward.
    * @param size - Cells a side of the uv grid: a power of two. `shown` pixels a side of the image are made of it: the middle
    *   half is closer to the settled beam than the whole.
-   * @param fieldRad, pixelRad - Of the density cells and of the image, as `previewGeometry` pairs them.
+   * @param fieldRad - Of the density cells and of the image, as `previewGeometry` pairs them.
+   * @param pixelRad - Goes with fieldRad.
    * @param uv - Side of the drawn uv grid and its cells a metre.
    */
   constructor(

@@ -20,7 +20,8 @@ export class SettledBeam {
 
   /**
    * @param axes - The image wanted.
-   * @param maxUWavelengths, maxVWavelengths - Bounds of |u| and |v| over all samples: they size the grid.
+   * @param maxUWavelengths - Bounds of |u| and |v| over all samples: they size the grid.
+   * @param maxVWavelengths - Goes with maxUWavelengths.
    */
   constructor(axes: PlaneAxes, maxUWavelengths: number, maxVWavelengths: number) {
     this.axes = axes;

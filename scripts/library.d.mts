@@ -1,0 +1,1 @@
+export function entryPoints(): readonly string[];

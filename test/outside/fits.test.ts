@@ -1,0 +1,4 @@
+import { fitsChecks } from "./checks/fits.ts";
+import { section } from "./section.ts";
+
+section("FITS", fitsChecks);

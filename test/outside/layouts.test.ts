@@ -1,0 +1,4 @@
+import { layoutChecks } from "./checks/layouts.ts";
+import { section } from "./section.ts";
+
+section("Layouts", layoutChecks);

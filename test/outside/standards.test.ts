@@ -1,0 +1,4 @@
+import { standardsChecks } from "./checks/standards.ts";
+import { section } from "./section.ts";
+
+section("Standards", standardsChecks);

@@ -1,0 +1,4 @@
+import { weightingChecks } from "./checks/weighting.ts";
+import { section } from "./section.ts";
+
+section("Weighting", weightingChecks);
