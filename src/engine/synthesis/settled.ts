@@ -5,8 +5,8 @@ import { columnStart, foldInPlace, type HalfGrid, halfGrid, spread, type ToCells
 import { SymmetricTransform } from "./transform.ts";
 import type { BaselineRun } from "./walk.ts";
 
-/** Spreading error promised of every settled beam, as a fraction of the peak; some hundred times more than is measured. */
-const TOLERANCE = 1e-6;
+/** Error promised of every settled beam, at every pixel, as a fraction of the peak. */
+export const SETTLED_TOLERANCE = 1e-6;
 
 /**
  * A settled beam in the making: samples are spread over a grid twice as fine as the image needs, transformed, and the
@@ -22,10 +22,11 @@ export class SettledBeam {
    * @param axes - The image wanted.
    * @param maxUWavelengths - Bounds of |u| and |v| over all samples: they size the grid.
    * @param maxVWavelengths - Goes with maxUWavelengths.
+   * @param tolerance - Of the peak, everywhere in the image.
    */
-  constructor(axes: PlaneAxes, maxUWavelengths: number, maxVWavelengths: number) {
+  constructor(axes: PlaneAxes, maxUWavelengths: number, maxVWavelengths: number, tolerance = SETTLED_TOLERANCE) {
     this.axes = axes;
-    this.kernel = kernelFor(TOLERANCE);
+    this.kernel = kernelFor(tolerance);
     const size = this.kernel.oversampling * 2 ** Math.ceil(Math.log2(Math.max(16, axes.size)));
     this.map = { xu: axes.xl * size, xv: axes.xm * size, yu: axes.yl * size, yv: axes.ym * size };
     this.grid = halfGrid(size, Math.abs(this.map.xu) * maxUWavelengths + Math.abs(this.map.xv) * maxVWavelengths);

@@ -56,7 +56,7 @@ export function spread(
   const xv = map.xv * scale;
   const yu = map.yu * scale;
   const yv = map.yv * scale;
-  const v = new Float64Array(8);
+  const v = new Float64Array(width);
   for (let k = 0; k < count; k++) {
     let x = xu * uM[k] + xv * vM[k];
     let y = yu * uM[k] + yv * vM[k];
@@ -79,7 +79,7 @@ export function spread(
     tap = 3 * width * rx;
     let at = stride * (column0 + MARGIN) + row0 + MARGIN;
     const w = weight[k];
-    if (width === 7) {
+    if (width === 8) {
       // The width of every settled beam, written out: twice as fast as the loop.
       const v0 = v[0];
       const v1 = v[1];
@@ -88,7 +88,8 @@ export function spread(
       const v4 = v[4];
       const v5 = v[5];
       const v6 = v[6];
-      for (let a = 0; a < 7; a++, tap += 3, at += stride) {
+      const v7 = v[7];
+      for (let a = 0; a < 8; a++, tap += 3, at += stride) {
         const p = w * (taps[tap] + dx * (taps[tap + 1] + dx * taps[tap + 2]));
         cells[at] += p * v0;
         cells[at + 1] += p * v1;
@@ -97,6 +98,7 @@ export function spread(
         cells[at + 4] += p * v4;
         cells[at + 5] += p * v5;
         cells[at + 6] += p * v6;
+        cells[at + 7] += p * v7;
       }
       continue;
     }
