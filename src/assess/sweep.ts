@@ -3,7 +3,8 @@ import { SPEED_OF_LIGHT } from "../base/constants.ts";
 import { DomainError } from "../base/errors.ts";
 import { observationById } from "../plan/find.ts";
 import type { Observation, Plan } from "../plan/schema.ts";
-import { type AssessOptions, assess } from "./assess.ts";
+import type { AssessOptions } from "./assess.ts";
+import { type Assessor, inTurn } from "./jobs.ts";
 import type { AssessResult } from "./result.ts";
 
 export type SweepAxis = "declination" | "wavelength" | "frequency" | "hours";
@@ -64,22 +65,26 @@ export function variedPlan(plan: Plan, observationId: string, axis: SweepAxis, a
   return { ...plan, observations: plan.observations.map((o) => (o.id === observationId ? wanted : o)) };
 }
 
-/** Results along one axis, in the order of its points. */
+/**
+ * Results along one axis, in the order of its points.
+ *
+ * @param run - Who does the work: one after the other here, or a pool of workers; the results are the same.
+ */
 export async function sweep(
   plan: Plan,
   layoutId: string,
   observationId: string,
   spec: SweepSpec,
   checkpoint?: Checkpoint,
-  options?: AssessOptions,
+  options: AssessOptions = {},
+  run: Assessor = inTurn,
 ): Promise<readonly SweepPoint[]> {
-  const points: SweepPoint[] = [];
-  const count = spec.values.length;
-  for (const [k, at] of spec.values.entries()) {
-    const result = await assess(variedPlan(plan, observationId, spec.axis, at), layoutId, observationId, options, (done) =>
-      checkpoint?.((k + done) / count),
-    );
-    points.push({ at, result });
-  }
-  return points;
+  const jobs = spec.values.map((at) => ({
+    plan: variedPlan(plan, observationId, spec.axis, at),
+    layout: layoutId,
+    observation: observationId,
+    options,
+  }));
+  const results = await run(jobs, checkpoint);
+  return results.map((result, k) => ({ at: spec.values[k], result }));
 }

@@ -1,10 +1,10 @@
-import { assess } from "../assess/assess.ts";
 import { judge } from "../assess/requirements.ts";
 import type { AssessResult } from "../assess/result.ts";
 import { roundedJson } from "../base/json.ts";
 import type { Layout, Observation, Pair, Plan } from "../plan/schema.ts";
 import { type LedgerModel, ledgerModel } from "../view/ledger/ledger.ts";
 import { resultTable } from "../view/tables.ts";
+import { withAssessor } from "./assessor.ts";
 import { someOf } from "./choice.ts";
 import { DONE, NOT_MET } from "./faults.ts";
 import type { Io } from "./io.ts";
@@ -19,6 +19,7 @@ export interface AssessCall {
   readonly json?: boolean;
   readonly require?: boolean;
   readonly pair?: Pair;
+  readonly workers?: number;
 }
 
 /** `assess`: all results of every pair asked for, and with `--require` the ledger of each layout. */
@@ -26,15 +27,14 @@ export async function assessVerb(io: Io, path: string, call: AssessCall): Promis
   const { plan, warnings } = await readPlanFile(path);
   const { layouts, observations } = someOf(plan, call);
   warnOfPlan(io, path, warnings);
-  const results: AssessResult[] = [];
+  let results: readonly AssessResult[];
   const ledgers: { readonly layout: string; readonly ledger: LedgerModel }[] = [];
   const pairs = observations.flatMap((observation) => layouts.map((layout) => ({ layout, observation })));
   const running = progress(io, "assessing");
   try {
-    for (const [k, { layout, observation }] of pairs.entries()) {
-      const step = part(running.checkpoint, k / pairs.length, (k + 1) / pairs.length);
-      results.push(await assess(plan, layout.id, observation.id, { pair: call.pair ?? null }, step));
-    }
+    const options = { pair: call.pair ?? null };
+    const jobs = pairs.map(({ layout, observation }) => ({ plan, layout: layout.id, observation: observation.id, options }));
+    results = await withAssessor(io, call.workers, jobs.length, (run) => run(jobs, running.checkpoint));
   } finally {
     running.end();
   }

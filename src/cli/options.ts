@@ -22,6 +22,18 @@ export const pairOption = (): Option =>
     "two point sources to tell apart: separation (arcsec, or with a unit), position angle (degrees, default 0), flux ratio up to 1 (default 1)",
   ).argParser((text: string) => orInvalid(() => pairOf(text)));
 
+/** `--workers N`. */
+export const workersOption = (): Option =>
+  new Option("--workers <n>", "threads to work on, 1 to 64; one a processor when left out; the results are the same").argParser(
+    (text: string) => {
+      const count = Number(text);
+      if (!(Number.isInteger(count) && count >= 1 && count <= 64)) {
+        throw new InvalidArgumentError("Expected a whole number from 1 to 64.");
+      }
+      return count;
+    },
+  );
+
 /** `--vary AXIS=FROM:TO:STEP`. */
 export const varyOption = (): Option =>
   new Option("--vary <axis=from:to:step>", "what to vary: declination, wavelength, frequency or hours, both ends included")

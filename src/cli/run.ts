@@ -3,7 +3,7 @@ import { type AssessCall, assessVerb } from "./assess.ts";
 import { type BeamCall, beamVerb } from "./beam.ts";
 import { DONE, ending } from "./faults.ts";
 import type { Io } from "./io.ts";
-import { once, pairOption, repeated, varyOption } from "./options.ts";
+import { once, pairOption, repeated, varyOption, workersOption } from "./options.ts";
 import { type SweepCall, sweepVerb } from "./sweep.ts";
 import { type TracksCall, tracksVerb } from "./tracks.ts";
 import { version } from "./version.ts";
@@ -76,11 +76,9 @@ function commands(io: Io, texts: Promise<void>[], ended: (code: number) => void)
     .addOption(repeated("--layout <id>", "only this layout; may be repeated"))
     .addOption(repeated("--observation <id>", "only this observation; may be repeated"))
     .option("--json", "print the results as JSON")
-    .option(
-      "--require",
-      "judge the plan's requirements and print the ledger (on stderr with --json); exit 1 when one is not met or cannot be computed",
-    )
+    .option("--require", "judge the plan's requirements and print the ledger (on stderr with --json); exit 1 when one is not met")
     .addOption(pairOption())
+    .addOption(workersOption())
     .action(async (path: string, call: AssessCall) => ended(await assessVerb(io, path, call)));
 
   verb(
@@ -116,6 +114,7 @@ function commands(io: Io, texts: Promise<void>[], ended: (code: number) => void)
     .addOption(observation())
     .addOption(varyOption())
     .addOption(pairOption())
+    .addOption(workersOption())
     .option("--json", "JSON in place of CSV")
     .addOption(once("--out <file>", "where to write; stdout when left out"))
     .addHelpText(

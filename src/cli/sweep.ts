@@ -3,6 +3,7 @@ import { type SweepPoint, type SweepSpec, sweep, varied } from "../assess/sweep.
 import { roundedJson } from "../base/json.ts";
 import { type Cell, csvLines } from "../formats/csv.ts";
 import type { Pair } from "../plan/schema.ts";
+import { withAssessor } from "./assessor.ts";
 import { oneOf } from "./choice.ts";
 import { DONE } from "./faults.ts";
 import type { Io } from "./io.ts";
@@ -19,6 +20,7 @@ export interface SweepCall {
   readonly pair?: Pair;
   readonly json?: boolean;
   readonly out?: string;
+  readonly workers?: number;
 }
 
 /** `sweep`: the results of `assess` along one axis, a row or an object for each point. */
@@ -33,7 +35,10 @@ export async function sweepVerb(io: Io, path: string, call: SweepCall): Promise<
   const running = progress(io, "sweep");
   let points: readonly SweepPoint[];
   try {
-    points = await sweep(plan, layout.id, observation.id, vary, running.checkpoint, { pair: call.pair ?? null });
+    const options = { pair: call.pair ?? null };
+    points = await withAssessor(io, call.workers, vary.values.length, (run) =>
+      sweep(plan, layout.id, observation.id, vary, running.checkpoint, options, run),
+    );
   } finally {
     running.end();
   }

@@ -1,14 +1,5 @@
-import { type Desk, type FromWorker, STALE, TaskFault, type TaskName, type ToWorker } from "../tasks/protocol.ts";
+import { type Desk, type FromWorker, STALE, TaskFault, type TaskName, type WorkerLike } from "../tasks/protocol.ts";
 import type { Tasks } from "../tasks/table.ts";
-
-/** The part of `Worker` the host leans on. */
-export interface WorkerLike {
-  postMessage(message: ToWorker): void;
-  terminate(): void;
-  onmessage: ((event: { readonly data: FromWorker }) => void) | null;
-  onerror: ((event: { readonly message?: string }) => void) | null;
-  onmessageerror: ((event: unknown) => void) | null;
-}
 
 interface Job {
   readonly id: number;

@@ -5,9 +5,9 @@ import workedPlan from "../../scenarios/thistledown.plan.json?url";
 import { isTask, type TaskName } from "../screen/session.ts";
 import { Store } from "../screen/store.ts";
 import { tokens } from "../screen/tokens.ts";
+import type { WorkerLike } from "../tasks/protocol.ts";
 import { desk } from "./desk.ts";
 import { chosenFile, opened, saved } from "./files.ts";
-import type { WorkerLike } from "./host.ts";
 import "./page.css";
 import { isThemeChosen, keepKeys, keepTheme, startingKeys, startingTheme } from "./theme.ts";
 
@@ -28,7 +28,11 @@ async function start(): Promise<void> {
   if (!response.ok) throw new Error(`The worked plan could not be fetched: ${response.status}.`);
   const { plan } = readPlan(await response.text());
   const worker = (): WorkerLike => new Worker(new URL("./worker.ts", import.meta.url), { type: "module" }) as unknown as WorkerLike;
-  const store = new Store(desk(worker), plan, { task: taskOfHash(), theme: startingTheme(), keys: startingKeys() });
+  const store = new Store(desk(worker, navigator.hardwareConcurrency ?? 2), plan, {
+    task: taskOfHash(),
+    theme: startingTheme(),
+    keys: startingKeys(),
+  });
   followSession(store);
   followFiles(store);
   app.store = store;

@@ -15,6 +15,15 @@ export type FromWorker =
   | { readonly kind: "fault"; readonly id: number; readonly message: string; readonly field: string | null }
   | { readonly kind: "cancelled"; readonly id: number };
 
+/** The part of a worker that those who run tasks on it lean on: a page's worker has it, and a thread of Node's is made to. */
+export interface WorkerLike {
+  postMessage(message: ToWorker): void;
+  terminate(): void;
+  onmessage: ((event: { readonly data: FromWorker }) => void) | null;
+  onerror: ((event: { readonly message?: string }) => void) | null;
+  onmessageerror: ((event: unknown) => void) | null;
+}
+
 /** Thrown by a checkpoint when the job is no longer wanted. */
 export class Cancelled extends Error {
   override readonly name = "Cancelled";

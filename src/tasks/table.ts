@@ -1,3 +1,4 @@
+import type { AssessJob } from "../assess/jobs.ts";
 import type { RequirementOutcome } from "../assess/requirements.ts";
 import type { AssessResult, Picture, PictureRequest, PreviewRequest } from "../assess/result.ts";
 import type { SweepPoint, SweepSpec } from "../assess/sweep.ts";
@@ -14,7 +15,9 @@ export interface Tasks {
     { readonly plan: Plan; readonly layout: string; readonly known: readonly AssessResult[] },
     readonly RequirementOutcome[],
   ];
-  /** One quantity set along one axis. */
+  /** One layout and observation, figures alone: a point of a sweep. */
+  assess: [AssessJob, AssessResult];
+  /** One quantity set along one axis. Its points go to workers as `assess`. */
   sweep: [
     { readonly plan: Plan; readonly layout: string; readonly observation: string; readonly spec: SweepSpec },
     readonly SweepPoint[],

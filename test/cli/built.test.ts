@@ -62,4 +62,28 @@ describe("the built program", () => {
     expect(said).toContain("spanwright: stopped; nothing was written\n");
     expect(desk.list()).toEqual(["ridge.plan.json"]);
   });
+
+  it.skipIf(!isBuilt)(`gives the same bytes on one thread, two and eight${note}`, () => {
+    const swept = (workers: string) =>
+      spawned(
+        "sweep",
+        plan,
+        "--layout",
+        "wide",
+        "--observation",
+        "south",
+        "--vary",
+        "declination=-40:0:10",
+        "--workers",
+        workers,
+        "--json",
+      );
+    const [one, two, eight] = ["1", "2", "8"].map(swept);
+    expect([one.status, two.status, eight.status]).toEqual([0, 0, 0]);
+    expect(JSON.parse(one.stdout)).toHaveLength(5);
+    expect(two.stdout).toBe(one.stdout);
+    expect(eight.stdout).toBe(one.stdout);
+    const assessed = (workers: string) => spawned("assess", plan, "--json", "--workers", workers).stdout;
+    expect(assessed("4")).toBe(assessed("1"));
+  });
 });

@@ -41,6 +41,7 @@ export async function ranWith(conditions: Conditions, ...argv: readonly string[]
       return looks * (conditions.tickMs ?? 0);
     },
     signal: stop.signal,
+    cores: 1,
   };
   const code = await run(argv, io);
   return { code, out, err };

@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
-import { Host, type WorkerLike } from "../../src/page/host.ts";
-import { type FromWorker, STALE, type ToWorker } from "../../src/tasks/protocol.ts";
+import { Host } from "../../src/page/host.ts";
+import { type FromWorker, STALE, type ToWorker, type WorkerLike } from "../../src/tasks/protocol.ts";
 
 /** A worker that answers when the test says so. */
 class Scripted implements WorkerLike {
