@@ -1,5 +1,7 @@
+import { medianOf, type Outcome, peakMiB, type Row, timeMs } from "./outcome.ts";
+
 /** One comparison: how many times faster `fast` is than `plain`. */
-export interface Row {
+export interface Comparison {
   readonly name: string;
   readonly goal: number;
   readonly make: () => Promise<{
@@ -10,53 +12,37 @@ export interface Row {
   }>;
 }
 
-export interface Outcome {
-  readonly name: string;
-  readonly goal: number;
-  readonly ratio: number;
-  readonly low: number;
-  readonly high: number;
-  readonly fastMs: number;
-  readonly plainMs: number;
-  readonly rounds: number;
-  readonly peakMiB: number;
-  readonly note: string;
-}
-
 const ROUNDS = 6;
 
 /**
- * Interleaves the two, swapping who goes first. The ratio is of the minima over all rounds; low and high are the least and
- * the largest ratio of a single round. `plainTimes` multiplies a plain run that covers only part of the work.
+ * Interleaves the two, swapping who goes first. The ratio is of the minima over all rounds; median, low and high are those of
+ * single rounds. `plainTimes` multiplies a plain run that covers only part of the work.
  */
-export async function measure(row: Row): Promise<Outcome> {
-  const { fast, plain, plainTimes, note } = await row.make();
+export const ratioRow = (comparison: Comparison): Row => ({ name: comparison.name, measure: () => measured(comparison) });
+
+async function measured({ name, goal, make }: Comparison): Promise<Outcome> {
+  const { fast, plain, plainTimes, note } = await make();
   for (let k = 0; k < 3; k++) fast();
   plain();
-  const time = (run: () => unknown): number => {
-    const start = performance.now();
-    run();
-    return performance.now() - start;
-  };
   const pairs = Array.from({ length: ROUNDS }, (_, k) => {
     const first = k % 2 === 0;
-    const a = first ? time(fast) : 0;
-    const b = time(plain) * plainTimes;
-    return { fast: first ? a : time(fast), plain: b };
+    const a = first ? timeMs(fast) : 0;
+    const b = timeMs(plain) * plainTimes;
+    return { fast: first ? a : timeMs(fast), plain: b };
   });
   const fastMs = Math.min(...pairs.map((p) => p.fast));
   const plainMs = Math.min(...pairs.map((p) => p.plain));
   const ratios = pairs.map((p) => p.plain / p.fast);
   return {
-    name: row.name,
-    goal: row.goal,
-    ratio: plainMs / fastMs,
+    name,
+    value: plainMs / fastMs,
+    unit: "× faster",
+    goal,
+    sense: "at least",
+    median: medianOf(ratios),
     low: Math.min(...ratios),
     high: Math.max(...ratios),
-    fastMs,
-    plainMs,
-    rounds: ROUNDS,
-    peakMiB: process.resourceUsage().maxRSS / 1024,
-    note: note ?? "",
+    peakMiB: peakMiB(),
+    detail: `${fastMs.toFixed(2)} ms against ${plainMs.toPrecision(4)} ms, minima of ${ROUNDS} interleaved rounds${note ? `; ${note}` : ""}`,
   };
 }

@@ -14,7 +14,7 @@ import { Walk } from "../../src/engine/synthesis/walk.ts";
 import { sampleWeights } from "../../src/engine/synthesis/weights.ts";
 import { parkMiller } from "../support/random.ts";
 import { madeUpTrack } from "../support/track.ts";
-import type { Row } from "./ratio.ts";
+import type { Comparison } from "./ratio.ts";
 
 const G = 1024;
 const STATIONS = 64;
@@ -49,7 +49,7 @@ class PlainTransform {
   }
 }
 
-const transform: Row = {
+const transform: Comparison = {
   name: "beam transform, G 1024, against plain complex 2-D fft.js",
   goal: 12,
   make: async () => {
@@ -81,7 +81,7 @@ const transform: Row = {
   },
 };
 
-const gridding: Row = {
+const gridding: Comparison = {
   name: "nearest-cell gridding, 64 × 240, against the straightforward loop",
   goal: 6,
   make: async () => {
@@ -134,7 +134,7 @@ const gridding: Row = {
   },
 };
 
-const preview: Row = {
+const preview: Comparison = {
   name: "preview frame, one of 64 stations moved, 240 times, G 1024, against plain recomputation",
   goal: 14,
   make: async () => {
@@ -188,7 +188,7 @@ const preview: Row = {
   },
 };
 
-const settled: Row = {
+const settled: Comparison = {
   name: "settled beam, 64 × 240, G 1024, against the direct sum a pixel × pixels",
   goal: 2000,
   make: async () => {
@@ -236,4 +236,4 @@ const settled: Row = {
   },
 };
 
-export const rows: readonly Row[] = [transform, gridding, preview, settled];
+export const comparisons: readonly Comparison[] = [transform, gridding, preview, settled];
