@@ -1,6 +1,8 @@
 import type { Checkpoint } from "../base/checkpoint.ts";
 import { ARCSEC_PER_RAD, RAD_PER_DEG, SIDEREAL_RATE, SPEED_OF_LIGHT } from "../base/constants.ts";
 import { coverage } from "../engine/measure/coverage.ts";
+import { correlatorLoad, fieldNeeds } from "../engine/measure/load.ts";
+import { fraunhoferM } from "../engine/measure/nearfield.ts";
 import { beamSolidAngle, brightnessK, imageNoiseJy } from "../engine/measure/noise.ts";
 import { type PairOutcome, pairOutcome } from "../engine/measure/pair.ts";
 import { cyclicExtreme, halfPowerWidths, radiusAt } from "../engine/measure/rays.ts";
@@ -14,11 +16,12 @@ import {
   primaryBeamRad,
   timeSmearingRad,
 } from "../engine/measure/scales.ts";
+import { protectionOf } from "../engine/sky/bands.ts";
 import { noiseFactor } from "../engine/synthesis/sums.ts";
 import { TOO_HIGH, TOO_LOW, type Visibility } from "../engine/synthesis/visibility.ts";
-import type { Pair, Plan } from "../plan/schema.ts";
+import type { Observation, Pair, Plan } from "../plan/schema.ts";
 import { type MeasuredBeam, measureBeam } from "./beam.ts";
-import type { AssessResult, BeamFigures, PairResult } from "./result.ts";
+import type { AssessResult, BeamFigures, FullField, PairResult } from "./result.ts";
 import { setup } from "./setup.ts";
 import { type Synthesis, synthesize } from "./synthesis.ts";
 
@@ -158,8 +161,29 @@ function figures(synthesis: Synthesis, beam: MeasuredBeam | undefined, pair: Pai
         : null,
     smearing,
     planarRadiusArcsec,
+    fraunhoferM: {
+      antenna: fraunhoferM(Math.max(...antennas.map((a) => a.diameterM)), wavelengthM),
+      array: lengths.longest === null ? null : fraunhoferM(lengths.longest, wavelengthM),
+    },
+    protectedFraction: protectionOf(...bandOf(observation)).fraction,
+    fullField: fullField(fwhmRad, Math.min(...Object.values(primaryBeams)) / ARCSEC_PER_RAD, stations.length, observation),
     warnings,
   };
+}
+
+const bandOf = ({ frequencyHz, bandwidthHz }: Observation): [number, number] => [
+  frequencyHz - bandwidthHz / 2,
+  frequencyHz + bandwidthHz / 2,
+];
+
+/** Loss of a point source's peak that a full field may have at its edge, by each of band and time. */
+const FIELD_LOSS = 0.1;
+
+function fullField(fwhmRad: number | null, primaryRad: number, stationCount: number, observation: Observation): FullField {
+  if (fwhmRad === null) return { channelWidthHz: null, sampleS: null, visibilitiesPerS: null, bytesPerS: null };
+  const needs = fieldNeeds(primaryRad / 2, fwhmRad, observation.frequencyHz, FIELD_LOSS);
+  const { visibilitiesPerS, bytesPerS } = correlatorLoad(stationCount, observation.bandwidthHz, needs, observation.polarizations);
+  return { ...needs, visibilitiesPerS, bytesPerS };
 }
 
 /** Σ 1/(SEFD_i·SEFD_j) over the samples that count; null where a sensitivity is not known. */

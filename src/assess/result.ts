@@ -40,7 +40,22 @@ export interface AssessResult {
   readonly brightnessNoiseK: number | null;
   readonly smearing: { readonly bandwidthArcsec: number | null; readonly timeArcsec: number | null };
   readonly planarRadiusArcsec: number | null;
+  /** Beyond this a wave is flat to λ/16 over the largest dish, and over the longest baseline: 2D²/λ. */
+  readonly fraunhoferM: { readonly antenna: number; readonly array: number | null };
+  /** Part of the band that the Radio Regulations protect for radio astronomy (Nos. 5.149, 5.340), below 100 GHz. */
+  readonly protectedFraction: number;
+  /** What an image out to the half level of the smallest primary beam asks for, at 10 % loss there by each. */
+  readonly fullField: FullField;
   readonly warnings: readonly string[];
+}
+
+export interface FullField {
+  /** Widest channel and longest sample. */
+  readonly channelWidthHz: number | null;
+  readonly sampleS: number | null;
+  /** What a correlator then hands over: baselines and autocorrelations, all channels and products; 8 bytes each. */
+  readonly visibilitiesPerS: number | null;
+  readonly bytesPerS: number | null;
 }
 
 export interface CoverageResult {

@@ -78,6 +78,13 @@ const groups: readonly (readonly Figure[])[] = [
     ["plane approximation holds to", "angle", "planarRadiusArcsec"],
     ["field that sets the density cells", "angle", "densityFieldArcsec"],
   ],
+  [
+    ["band protected for radio astronomy", "fraction", "protectedFraction"],
+    ["far field of the largest dish from", "length", "fraunhoferM.antenna"],
+    ["whole primary beam: channels of", "frequency", "fullField.channelWidthHz"],
+    ["whole primary beam: samples of", "seconds", "fullField.sampleS"],
+    ["whole primary beam: visibilities a second", "count", "fullField.visibilitiesPerS"],
+  ],
 ];
 
 /** Kinds whose sign says something. */

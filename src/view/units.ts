@@ -12,6 +12,8 @@ export type Kind =
   | "flux"
   | "temperature"
   | "count"
+  | "frequency"
+  | "seconds"
   | "wavelengths";
 
 /** One way of writing a kind: `value / size` is the figure shown. */
@@ -45,6 +47,16 @@ const steps: { readonly [K in Kind]?: readonly (readonly [from: number, word: st
     [0, "µK", 1e-6],
     [1e-3, "mK", 1e-3],
     [1, "K", 1],
+  ],
+  frequency: [
+    [0, "Hz", 1],
+    [1e3, "kHz", 1e3],
+    [1e6, "MHz", 1e6],
+    [1e9, "GHz", 1e9],
+  ],
+  seconds: [
+    [0, "ms", 1e-3],
+    [1, "s", 1],
   ],
   wavelengths: [
     [0, "λ", 1],

@@ -119,6 +119,13 @@ describe("a result", () => {
       "smearing.bandwidthArcsec",
       "smearing.timeArcsec",
       "planarRadiusArcsec",
+      "fraunhoferM.antenna",
+      "fraunhoferM.array",
+      "protectedFraction",
+      "fullField.channelWidthHz",
+      "fullField.sampleS",
+      "fullField.visibilitiesPerS",
+      "fullField.bytesPerS",
       "warnings",
     ];
     expect(paths(await assess(plan(), "all", "o"))).toEqual(keys);

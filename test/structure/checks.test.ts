@@ -1,4 +1,4 @@
-import { readdirSync } from "node:fs";
+import { readdirSync, readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import { sections } from "../outside/sections.ts";
 
@@ -32,5 +32,13 @@ describe("the outside checks", () => {
 
   it("number at least two hundred", () => {
     expect(checks.length).toBeGreaterThanOrEqual(200);
+  });
+
+  it("stand as they are in the printed copy the README links to", () => {
+    const printed = readFileSync("assets/checks.txt", "utf8");
+    for (const { id, source } of checks) expect(printed.includes(`  ${id} `) && printed.includes(source), id).toBe(true);
+    expect(printed.trimEnd()).toMatch(
+      new RegExp(`\\n${checks.length} rows, ${checks.length} within tolerance, 0 outside, \\d+ left out$`),
+    );
   });
 });

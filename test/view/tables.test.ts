@@ -38,6 +38,9 @@ function result(layout: string, given: Partial<AssessResult> = {}): AssessResult
     brightnessNoiseK: null,
     smearing: { bandwidthArcsec: null, timeArcsec: null },
     planarRadiusArcsec: null,
+    fraunhoferM: { antenna: 1000, array: null },
+    protectedFraction: 0,
+    fullField: { channelWidthHz: null, sampleS: null, visibilitiesPerS: null, bytesPerS: null },
     warnings: [],
     ...given,
   };
@@ -75,7 +78,8 @@ describe("a table of results", () => {
   it("shows a dash for what cannot be had, never 0", () => {
     const cells = resultTable(plan, observation, [result("a")], null)
       .groups.flat()
-      .filter((row) => row.label !== "stations" && row.label !== "baselines" && !row.label.startsWith("primary"));
+      // These are there whether the source rises or not.
+      .filter((row) => !/^(stations|baselines|primary|band protected|far field)/.test(row.label));
     for (const row of cells) {
       expect(row.cells).toEqual([row.label.startsWith("hours") ? "0.0" : NONE]);
     }

@@ -95,6 +95,31 @@ export function allFigures(result: AssessResult, observation: Observation): read
         ["Bandwidth smearing", of("angle", smearing.bandwidthArcsec), "radius of 10 % peak loss, one channel"],
         ["Time smearing", of("angle", smearing.timeArcsec), "radius of 10 % peak loss, mean law: exact for no one direction"],
         ["Planar radius", of("angle", result.planarRadiusArcsec), "beyond it leaving w out costs more than 0.1 rad of phase"],
+        [
+          "Far field",
+          of("length", result.fraunhoferM.antenna),
+          `2D²/λ of the largest dish; of the array ${of("length", result.fraunhoferM.array)}`,
+        ],
+      ],
+    },
+    {
+      title: "Band and data",
+      rows: [
+        [
+          "Protected band",
+          of("fraction", result.protectedFraction),
+          "of the band, below 100 GHz (Radio Regulations 5.149, 5.340); what holds at a site is for the spectrum authority",
+        ],
+        [
+          "Channel, sample",
+          `${of("frequency", result.fullField.channelWidthHz)}, ${of("seconds", result.fullField.sampleS)}`,
+          "at most, for 10 % peak loss each at the half level of the smallest primary beam",
+        ],
+        [
+          "Visibilities a second",
+          of("count", result.fullField.visibilitiesPerS),
+          "with those channels and samples, autocorrelations too; 8 bytes each",
+        ],
       ],
     },
     {
