@@ -64,8 +64,12 @@ export function allFigures(result: AssessResult, observation: Observation): read
         ],
         [
           "First zero",
-          `${of("angle", beam.firstZeroMinArcsec)} to ${of("angle", beam.firstZeroMaxArcsec)}`,
-          "nearest and farthest over all directions",
+          beam.firstZeroMinArcsec !== null && beam.firstZeroMaxArcsec === null
+            ? `from ${of("angle", beam.firstZeroMinArcsec)}`
+            : `${of("angle", beam.firstZeroMinArcsec)} to ${of("angle", beam.firstZeroMaxArcsec)}`,
+          beam.firstZeroMinArcsec !== null && beam.firstZeroMaxArcsec === null
+            ? "nearest; in some directions there is none"
+            : "nearest and farthest over all directions",
         ],
         [
           "First minimum",
@@ -108,18 +112,14 @@ export function allFigures(result: AssessResult, observation: Observation): read
         [
           "Protected band",
           of("fraction", result.protectedFraction),
-          "of the band, below 100 GHz (Radio Regulations 5.149, 5.340); what holds at a site is for the spectrum authority",
+          "of the band: Radio Regulations 5.149 and 5.340, below 100 GHz",
         ],
         [
           "Channel, sample",
           `${of("frequency", result.fullField.channelWidthHz)}, ${of("seconds", result.fullField.sampleS)}`,
-          "at most, for 10 % peak loss each at the half level of the smallest primary beam",
+          "at most, for 10 % loss each at the primary beam’s half level",
         ],
-        [
-          "Visibilities a second",
-          of("count", result.fullField.visibilitiesPerS),
-          "with those channels and samples, autocorrelations too; 8 bytes each",
-        ],
+        ["Visibilities a second", of("count", result.fullField.visibilitiesPerS), "with those, autocorrelations too; 8 bytes each"],
       ],
     },
     {
