@@ -20,6 +20,7 @@ import { protectionOf } from "../engine/sky/bands.ts";
 import { noiseFactor } from "../engine/synthesis/sums.ts";
 import { TOO_HIGH, TOO_LOW, type Visibility } from "../engine/synthesis/visibility.ts";
 import type { Observation, Pair, Plan } from "../plan/schema.ts";
+import { airOver, NO_AIR } from "./air.ts";
 import { type MeasuredBeam, measureBeam } from "./beam.ts";
 import type { AssessResult, BeamFigures, FullField, PairResult } from "./result.ts";
 import { setup } from "./setup.ts";
@@ -80,6 +81,7 @@ function figures(synthesis: Synthesis, beam: MeasuredBeam | undefined, pair: Pai
   const factor = kept ? noiseFactor(sums) : null;
   const fwhmRad = beam?.lobe ? Math.sqrt(beam.lobe.majorRad * beam.lobe.minorRad) : null;
   const inverse = kept ? inverseSefdSquares(synthesis) : null;
+  const air = kept && inverse !== null ? airOver(given, seen, warnings) : NO_AIR;
   const noiseJy =
     inverse === null || factor === null
       ? null
@@ -90,7 +92,7 @@ function figures(synthesis: Synthesis, beam: MeasuredBeam | undefined, pair: Pai
           polarizations: observation.polarizations,
           efficiency: observation.efficiency,
           repeats: observation.repeats,
-          weightingFactor: factor,
+          weightingFactor: factor * (air.noiseFactor ?? 1),
         });
   const smearing = {
     bandwidthArcsec: fwhmRad && ARCSEC_PER_RAD * bandwidthSmearingRad(fwhmRad, observation.frequencyHz, track.channelWidthHz),
@@ -155,6 +157,7 @@ function figures(synthesis: Synthesis, beam: MeasuredBeam | undefined, pair: Pai
     densityFieldArcsec: ARCSEC_PER_RAD * synthesis.density.fieldRad,
     noiseJy,
     weightingNoiseFactor: factor,
+    air,
     brightnessNoiseK:
       noiseJy !== null && beam?.lobe
         ? brightnessK(noiseJy, observation.frequencyHz, beamSolidAngle(beam.lobe.majorRad, beam.lobe.minorRad))

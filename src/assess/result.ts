@@ -37,6 +37,8 @@ export interface AssessResult {
   readonly densityFieldArcsec: number | null;
   readonly noiseJy: number | null;
   readonly weightingNoiseFactor: number | null;
+  /** Clear air over the stations, counted in `noiseJy` where the observation gives its water vapour. */
+  readonly air: AirResult;
   readonly brightnessNoiseK: number | null;
   readonly smearing: { readonly bandwidthArcsec: number | null; readonly timeArcsec: number | null };
   readonly planarRadiusArcsec: number | null;
@@ -47,6 +49,13 @@ export interface AssessResult {
   /** What an image out to the half level of the smallest primary beam asks for, at 10 % loss there by each. */
   readonly fullField: FullField;
   readonly warnings: readonly string[];
+}
+
+/** Both null where the observation gives no water vapour, or the air cannot be counted: a warning says why. */
+export interface AirResult {
+  /** Nepers toward the zenith, over the station with the most. */
+  readonly zenithOpacity: number | null;
+  readonly noiseFactor: number | null;
 }
 
 export interface FullField {

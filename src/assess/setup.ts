@@ -2,12 +2,13 @@ import { ARCSEC_PER_RAD, RAD_PER_DEG, SPEED_OF_LIGHT } from "../base/constants.t
 import { stationNormals, stationXyzM } from "../engine/geodesy/originframe.ts";
 import { geodeticToEcef } from "../engine/geodesy/wgs84.ts";
 import { primaryBeamRad } from "../engine/measure/scales.ts";
+import { ruzeFactor, sefdJy } from "../engine/measure/sefd.ts";
 import { isoToJulian } from "../engine/sky/calendar.ts";
 import { precessFromJ2000 } from "../engine/sky/precession.ts";
 import { channelCentres, sampleTimes, type Track } from "../engine/synthesis/track.ts";
 import type { Weighting } from "../engine/synthesis/weights.ts";
 import { antennaById, layoutById, observationById, stationById } from "../plan/find.ts";
-import type { Antenna, Layout, Observation, Plan, Station } from "../plan/schema.ts";
+import type { Antenna, Layout, Observation, Plan, Receiver, Station } from "../plan/schema.ts";
 
 /** One layout and observation of a plan, as the engine wants them. */
 export interface Setup {
@@ -87,9 +88,18 @@ function smallestDishBeamRad(antennas: readonly Antenna[], wavelengthM: number):
   return primaryBeamRad(beamFactor, wavelengthM, diameterM);
 }
 
-/** Sensitivity of the first receiver whose band holds the frequency; undefined where none does. */
+/** The first receiver whose band holds the frequency; undefined where none does. */
+export const receiverAt = (antenna: Antenna, frequencyHz: number): Receiver | undefined =>
+  antenna.receivers.find((r) => r.fromHz <= frequencyHz && frequencyHz <= r.toHz);
+
+/** Its sensitivity without the air, Jy: as given, or of system temperature, aperture efficiency and surface. */
 export function sefdAt(antenna: Antenna, frequencyHz: number): number | undefined {
-  return antenna.receivers.find((r) => r.fromHz <= frequencyHz && frequencyHz <= r.toHz)?.sefdJy;
+  const receiver = receiverAt(antenna, frequencyHz);
+  if (!receiver) return undefined;
+  const { sefdJy: given, systemK, apertureEfficiency, surfaceRmsM } = receiver;
+  if (given !== null) return given;
+  if (systemK === null || apertureEfficiency === null) return undefined;
+  return sefdJy(systemK, antenna.diameterM, apertureEfficiency * ruzeFactor(surfaceRmsM, SPEED_OF_LIGHT / frequencyHz));
 }
 
 function declinationOfDate(observation: Observation, warnings: string[]): number {

@@ -24,6 +24,7 @@ export function crossFaults(document: unknown, most: number): Fault[] {
 function* allFaults(document: unknown): Generator<Fault> {
   yield* doubleIds(document);
   yield* namesNowhere(document);
+  yield* receiversOfNoSensitivity(document);
   yield* rangeFaults(document);
   yield* ringFaults(document);
 }
@@ -67,6 +68,26 @@ function* namesNowhere(document: unknown): Generator<Fault> {
   }
   const stations = idsOf(document, "stations");
   for (const [path, layout] of rows(document, "layouts")) yield* listedFaults(path, layout, stations);
+}
+
+/** A receiver says how sensitive it is in one of two ways. */
+function* receiversOfNoSensitivity(document: unknown): Generator<Fault> {
+  for (const [antennaPath, antenna] of rows(document, "antennas")) {
+    for (const [path, { sefdJy = null, systemK = null, apertureEfficiency = null }] of rows(antenna, "receivers", antennaPath)) {
+      if (sefdJy === null && (systemK === null || apertureEfficiency === null)) {
+        yield {
+          path: `${path}.sefdJy`,
+          value: undefined,
+          expected: "a system equivalent flux density, or systemK and apertureEfficiency",
+        };
+      } else if (sefdJy !== null && (systemK !== null) !== (apertureEfficiency !== null)) {
+        const lacking = systemK === null ? "systemK" : "apertureEfficiency";
+        yield { path: `${path}.${lacking}`, value: undefined, expected: "both systemK and apertureEfficiency, or neither" };
+      } else if (sefdJy !== null && systemK !== null) {
+        yield { path: `${path}.sefdJy`, value: sefdJy, expected: "null where systemK and apertureEfficiency say it" };
+      }
+    }
+  }
 }
 
 function* listedFaults(layoutPath: string, layout: Row, stations: ReadonlySet<string>): Generator<Fault> {

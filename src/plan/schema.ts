@@ -52,7 +52,13 @@ export const geometrySchema = v.variant(
 export const receiverSchema = record({
   fromHz: frequency("a frequency"),
   toHz: frequency("a frequency"),
-  sefdJy: positive(1e12, "a system equivalent flux density", "Jy"),
+  /** Either this, or system temperature and aperture efficiency, of which it follows. */
+  sefdJy: orNull(positive(1e12, "a system equivalent flux density", "Jy")),
+  /** Without the air over the site. */
+  systemK: orNull(positive(1e6, "a system temperature", "K")),
+  /** Of a perfect surface: what `surfaceRmsM` costs comes on top (Ruze 1966). */
+  apertureEfficiency: orNull(positive(1, "an efficiency")),
+  surfaceRmsM: v.optional(ranged(0, 1, "a surface error in [0, 1] metres"), 0),
 });
 
 export const antennaSchema = record({
@@ -115,6 +121,8 @@ export const observationSchema = record({
   repeats: v.optional(whole(1, 100_000), 1),
   polarizations: v.optional(oneOf([1, 2]), 2),
   efficiency: v.optional(positive(1, "an efficiency"), 1),
+  /** Water vapour at sea level under the site; given, the air's opacity counts in the noise. */
+  vapourGm3: orNull(ranged(0, 50, "a water vapour density in [0, 50] g/m³")),
   weighting: v.optional(weightingSchema, {}),
   image: v.optional(imageSchema, {}),
 });
@@ -197,6 +205,7 @@ export const planSchema = record({
 export type Plan = v.InferOutput<typeof planSchema>;
 export type Site = v.InferOutput<typeof siteSchema>;
 export type Antenna = v.InferOutput<typeof antennaSchema>;
+export type Receiver = v.InferOutput<typeof receiverSchema>;
 export type Station = v.InferOutput<typeof stationSchema>;
 export type Layout = v.InferOutput<typeof layoutSchema>;
 export type Observation = v.InferOutput<typeof observationSchema>;

@@ -109,6 +109,8 @@ const words: { readonly [path: string]: QuantityWords } = {
   },
   "smearing.timeArcsec": { title: "Time smearing", short: "Smearing", kind: "angle", depends: ["wavelength"] },
   planarRadiusArcsec: { title: "Planar radius", short: "Planar", kind: "angle", depends: ["target", "wavelength"] },
+  "air.zenithOpacity": { title: "Zenith opacity", short: "Opacity", kind: "ratio", depends: ["wavelength"] },
+  "air.noiseFactor": { title: "Noise by the air", short: "Air", kind: "times", depends: ["target", "wavelength"] },
   "fraunhoferM.antenna": { title: "Far field of a dish", short: "Far field", kind: "length", depends: ["wavelength"] },
   "fraunhoferM.array": { title: "Far field of the array", short: "Far field", kind: "length", depends: ["wavelength"] },
   protectedFraction: { title: "Protected band", short: "Protected", kind: "fraction", depends: ["wavelength", "bandwidth"] },

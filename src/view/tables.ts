@@ -71,6 +71,7 @@ const groups: readonly (readonly Figure[])[] = [
     ["noise in the image, per beam", "flux", "noiseJy"],
     ["noise over natural", "times", "weightingNoiseFactor"],
     ["brightness noise", "temperature", "brightnessNoiseK"],
+    ["of it, by the air over the stations", "times", "air.noiseFactor"],
   ],
   [
     ["10 % bandwidth smearing at", "angle", "smearing.bandwidthArcsec"],

@@ -115,6 +115,8 @@ describe("a result", () => {
       "densityFieldArcsec",
       "noiseJy",
       "weightingNoiseFactor",
+      "air.zenithOpacity",
+      "air.noiseFactor",
       "brightnessNoiseK",
       "smearing.bandwidthArcsec",
       "smearing.timeArcsec",
@@ -412,5 +414,49 @@ describe("previews", () => {
     // A station dragged far outside gets a new grid rather than being left out.
     const far = moveStation(before, "S3", { latitudeDeg: -31.2, longitudeDeg: 24.3 });
     expect(ask(far)?.result.longestProjectedM).toBe((await assess(far, "all", "o")).longestProjectedM);
+  });
+});
+
+describe("receivers and the air", () => {
+  const receiver = { fromHz: 1e9, toHz: 1e11, sefdJy: null, systemK: 40, apertureEfficiency: 0.7 };
+  const at = (frequencyHz: number, change: object = {}, observation: object = {}) =>
+    assess(
+      plan({
+        antenna: { receivers: [{ ...receiver, ...change }] },
+        observation: { frequencyHz, bandwidthHz: 1e7, ...observation },
+      }),
+      "all",
+      "o",
+    );
+
+  it("take an SEFD from temperature, efficiency and surface as one that is given", async () => {
+    // 2kT/(ηA) of 12 m at 40 K and 0.7: 24.415235 Jy/K (the outside checks' S03-12) × 40 / 0.7.
+    const [computed, given] = [
+      await at(1.4e9),
+      await at(1.4e9, { sefdJy: (24.41523478 * 40) / 0.7, systemK: null, apertureEfficiency: null }),
+    ];
+    expect(computed.noiseJy as number).toBeCloseTo(given.noiseJy as number, 12);
+    const rough = await at(1e11, { surfaceRmsM: 299_792_458 / 1e11 / 16 });
+    const smooth = await at(1e11);
+    // λ/16 leaves 0.5396414858 of the efficiency (the outside checks' S17).
+    expect((smooth.noiseJy as number) / (rough.noiseJy as number)).toBeCloseTo(0.5396414858, 8);
+  });
+
+  it("count the air in the noise where its vapour is given, and only there", async () => {
+    const clear = await at(2.2e10);
+    expect(clear.air).toEqual({ zenithOpacity: null, noiseFactor: null });
+    const humid = await at(2.2e10, {}, { vapourGm3: 10 });
+    const dry = await at(2.2e10, {}, { vapourGm3: 1 });
+    expect(humid.air.zenithOpacity).toBeGreaterThan(dry.air.zenithOpacity as number);
+    expect((humid.noiseJy as number) / (clear.noiseJy as number)).toBeCloseTo(humid.air.noiseFactor as number, 12);
+    expect(dry.air.noiseFactor).toBeGreaterThan(1);
+    expect(humid.beam).toEqual(clear.beam);
+  });
+
+  it("leave the air out, and say so, where the system's temperature is not known", async () => {
+    const result = await at(2.2e10, { sefdJy: 900, systemK: null, apertureEfficiency: null }, { vapourGm3: 10 });
+    expect(result.air.noiseFactor).toBeNull();
+    expect(result.warnings.join(" ")).toContain("antenna a gives no systemK for the band");
+    expect(result.noiseJy).toBeGreaterThan(0);
   });
 });

@@ -38,6 +38,7 @@ function result(layout: string, given: Partial<AssessResult> = {}): AssessResult
     brightnessNoiseK: null,
     smearing: { bandwidthArcsec: null, timeArcsec: null },
     planarRadiusArcsec: null,
+    air: { zenithOpacity: null, noiseFactor: null },
     fraunhoferM: { antenna: 1000, array: null },
     protectedFraction: 0,
     fullField: { channelWidthHz: null, sampleS: null, visibilitiesPerS: null, bytesPerS: null },

@@ -130,6 +130,15 @@ export function allFigures(result: AssessResult, observation: Observation): read
           of("flux", result.noiseJy),
           `one channel image, ${observation.polarizations === 2 ? "Stokes I" : "one polarization"}, efficiency ${plain(observation.efficiency)}`,
         ],
+        [
+          "Air, opacity, times the noise",
+          observation.vapourGm3 === null
+            ? "not counted"
+            : `${result.air.zenithOpacity === null ? "cannot be had" : plain(result.air.zenithOpacity)}, ${of("times", result.air.noiseFactor)}`,
+          observation.vapourGm3 === null
+            ? "the observation gives no water vapour"
+            : "clear reference air, ITU-R P.676 and P.835; counted in the noise",
+        ],
         ["Brightness noise", of("temperature", result.brightnessNoiseK), "over the fitted beam"],
         ["Noise over natural", of("times", result.weightingNoiseFactor), `cost of ${weightingText(observation)}`],
       ],

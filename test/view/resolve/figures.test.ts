@@ -19,7 +19,14 @@ const plan: Plan = checkedPlan({
   format: "spanwright-plan",
   version: 1,
   site: { origin: { latitudeDeg: -30, longitudeDeg: 20 } },
-  antennas: [{ id: "d", diameterM: 12, elevationLimitDeg: 15, receivers: [{ fromHz: 1e9, toHz: 2e9, sefdJy: 400 }] }],
+  antennas: [
+    {
+      id: "d",
+      diameterM: 12,
+      elevationLimitDeg: 15,
+      receivers: [{ fromHz: 1e9, toHz: 2e9, sefdJy: 400, systemK: null, apertureEfficiency: null, surfaceRmsM: 0 }],
+    },
+  ],
   stations: [
     [0, 0],
     [0.011, 0.004],
@@ -155,7 +162,10 @@ describe("pairModel", () => {
 describe("scalesModel", () => {
   it("runs from 1 mm to 10 m, or wider by whole decades as receivers ask", () => {
     expect(wavelengthRange(0.21, plan.antennas)).toEqual([1e-3, 10]);
-    const low = { ...plan.antennas[0], receivers: [{ fromHz: 1e7, toHz: 2e7, sefdJy: 1 }] };
+    const low = {
+      ...plan.antennas[0],
+      receivers: [{ fromHz: 1e7, toHz: 2e7, sefdJy: 1, systemK: null, apertureEfficiency: null, surfaceRmsM: 0 }],
+    };
     expect(wavelengthRange(0.21, [low])[1]).toBeCloseTo(100, 9);
   });
 
