@@ -2,6 +2,7 @@ import type { Checkpoint } from "../base/checkpoint.ts";
 import { ARCSEC_PER_RAD, RAD_PER_DEG, SIDEREAL_RATE, SPEED_OF_LIGHT } from "../base/constants.ts";
 import { coverage } from "../engine/measure/coverage.ts";
 import { correlatorLoad, fieldNeeds } from "../engine/measure/load.ts";
+import { curvatureEllipse } from "../engine/measure/lobe.ts";
 import { fraunhoferM } from "../engine/measure/nearfield.ts";
 import { beamSolidAngle, brightnessK, imageNoiseJy } from "../engine/measure/noise.ts";
 import { type PairOutcome, pairOutcome } from "../engine/measure/pair.ts";
@@ -16,13 +17,14 @@ import {
   primaryBeamRad,
   timeSmearingRad,
 } from "../engine/measure/scales.ts";
+import { positionTolerance } from "../engine/measure/tolerance.ts";
 import { protectionOf } from "../engine/sky/bands.ts";
 import { noiseFactor } from "../engine/synthesis/sums.ts";
 import { TOO_HIGH, TOO_LOW, type Visibility } from "../engine/synthesis/visibility.ts";
 import type { Observation, Pair, Plan } from "../plan/schema.ts";
 import { airOver, NO_AIR } from "./air.ts";
 import { type MeasuredBeam, measureBeam } from "./beam.ts";
-import type { AssessResult, BeamFigures, FullField, PairResult } from "./result.ts";
+import type { AssessResult, BeamFigures, FullField, PairResult, PositionErrorResult } from "./result.ts";
 import { setup } from "./setup.ts";
 import { type Synthesis, synthesize } from "./synthesis.ts";
 
@@ -169,9 +171,22 @@ function figures(synthesis: Synthesis, beam: MeasuredBeam | undefined, pair: Pai
       array: lengths.longest === null ? null : fraunhoferM(lengths.longest, wavelengthM),
     },
     protectedFraction: protectionOf(...bandOf(observation)).fraction,
+    positionError: positionError(synthesis, wavelengthM),
     fullField: fullField(fwhmRad, Math.min(...Object.values(primaryBeams)) / ARCSEC_PER_RAD, stations.length, observation),
     warnings,
   };
+}
+
+/** From the spread of the samples along the beam's narrower axis: √(8 ln 2)/(2π·FWHM of the peak's curvature). */
+function positionError({ setup: { observation }, sums }: Synthesis, wavelengthM: number): PositionErrorResult {
+  const { positionErrorM } = observation;
+  if (positionErrorM === null || !(sums.weight > 0) || !(sums.uu + sums.vv > 0)) {
+    return { phaseDeg: null, coherence: null, widthFraction: null };
+  }
+  const { minorRad } = curvatureEllipse(sums.uu / sums.weight, sums.uv / sums.weight, sums.vv / sums.weight);
+  const rmsBaselineM = (Math.sqrt(8 * Math.LN2) / (2 * Math.PI * minorRad)) * wavelengthM;
+  const { phaseRad, coherence, widthFraction } = positionTolerance(positionErrorM, wavelengthM, rmsBaselineM);
+  return { phaseDeg: phaseRad / RAD_PER_DEG, coherence, widthFraction };
 }
 
 const bandOf = ({ frequencyHz, bandwidthHz }: Observation): [number, number] => [

@@ -46,9 +46,18 @@ export interface AssessResult {
   readonly fraunhoferM: { readonly antenna: number; readonly array: number | null };
   /** Part of the band that the Radio Regulations protect for radio astronomy (Nos. 5.149, 5.340), below 100 GHz. */
   readonly protectedFraction: number;
+  /** What the observation's position error costs: rms phase, what is left of a point's peak, change of the beam's width at most. */
+  readonly positionError: PositionErrorResult;
   /** What an image out to the half level of the smallest primary beam asks for, at 10 % loss there by each. */
   readonly fullField: FullField;
   readonly warnings: readonly string[];
+}
+
+/** All null where the observation states no error, or there are no samples. */
+export interface PositionErrorResult {
+  readonly phaseDeg: number | null;
+  readonly coherence: number | null;
+  readonly widthFraction: number | null;
 }
 
 /** Both null where the observation gives no water vapour, or the air cannot be counted: a warning says why. */

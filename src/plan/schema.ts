@@ -121,6 +121,8 @@ export const observationSchema = record({
   repeats: v.optional(whole(1, 100_000), 1),
   polarizations: v.optional(oneOf([1, 2]), 2),
   efficiency: v.optional(positive(1, "an efficiency"), 1),
+  /** Rms of every station coordinate that nobody knows of, metres: given, the results say what it costs. */
+  positionErrorM: orNull(ranged(0, 1000, "a position error in [0, 1000] metres")),
   /** Water vapour at sea level under the site; given, the air's opacity counts in the noise. */
   vapourGm3: orNull(ranged(0, 50, "a water vapour density in [0, 50] g/m³")),
   weighting: v.optional(weightingSchema, {}),

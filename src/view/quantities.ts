@@ -114,6 +114,19 @@ const words: { readonly [path: string]: QuantityWords } = {
   "fraunhoferM.antenna": { title: "Far field of a dish", short: "Far field", kind: "length", depends: ["wavelength"] },
   "fraunhoferM.array": { title: "Far field of the array", short: "Far field", kind: "length", depends: ["wavelength"] },
   protectedFraction: { title: "Protected band", short: "Protected", kind: "fraction", depends: ["wavelength", "bandwidth"] },
+  "positionError.phaseDeg": { title: "Phase by position error", short: "Phase", kind: "degrees", depends: ["wavelength"] },
+  "positionError.coherence": {
+    title: "Peak left by position error",
+    short: "Coherence",
+    kind: "fraction",
+    depends: ["wavelength"],
+  },
+  "positionError.widthFraction": {
+    title: "Beam change by position error",
+    short: "Width",
+    kind: "fraction",
+    depends: ["target", "weighting"],
+  },
   "fullField.channelWidthHz": {
     title: "Full field, channel",
     short: "Channel",

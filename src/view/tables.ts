@@ -81,6 +81,7 @@ const groups: readonly (readonly Figure[])[] = [
   ],
   [
     ["band protected for radio astronomy", "fraction", "protectedFraction"],
+    ["peak left by the stated position error", "fraction", "positionError.coherence"],
     ["far field of the largest dish from", "length", "fraunhoferM.antenna"],
     ["whole primary beam: channels of", "frequency", "fullField.channelWidthHz"],
     ["whole primary beam: samples of", "seconds", "fullField.sampleS"],

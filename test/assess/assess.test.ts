@@ -124,6 +124,9 @@ describe("a result", () => {
       "fraunhoferM.antenna",
       "fraunhoferM.array",
       "protectedFraction",
+      "positionError.phaseDeg",
+      "positionError.coherence",
+      "positionError.widthFraction",
       "fullField.channelWidthHz",
       "fullField.sampleS",
       "fullField.visibilitiesPerS",
@@ -458,5 +461,17 @@ describe("receivers and the air", () => {
     expect(result.air.noiseFactor).toBeNull();
     expect(result.warnings.join(" ")).toContain("antenna a gives no systemK for the band");
     expect(result.noiseJy).toBeGreaterThan(0);
+  });
+
+  it("say what a stated position error costs, and that a phase of one radian leaves e^−½ of the peak", async () => {
+    const none = await at(1.4e9);
+    expect(none.positionError).toEqual({ phaseDeg: null, coherence: null, widthFraction: null });
+    // 2π√2·ε/λ = 1 (the outside checks' S17b for the loss).
+    const positionErrorM = 299_792_458 / 1.4e9 / (2 * Math.PI * Math.SQRT2);
+    const { positionError } = await at(1.4e9, {}, { positionErrorM });
+    expect(positionError.phaseDeg).toBeCloseTo(180 / Math.PI, 9);
+    expect(positionError.coherence).toBeCloseTo(0.6065306597, 9);
+    expect(positionError.widthFraction).toBeGreaterThan(0);
+    expect(positionError.widthFraction).toBeLessThan(1e-3);
   });
 });

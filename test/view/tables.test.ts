@@ -41,6 +41,7 @@ function result(layout: string, given: Partial<AssessResult> = {}): AssessResult
     air: { zenithOpacity: null, noiseFactor: null },
     fraunhoferM: { antenna: 1000, array: null },
     protectedFraction: 0,
+    positionError: { phaseDeg: null, coherence: null, widthFraction: null },
     fullField: { channelWidthHz: null, sampleS: null, visibilitiesPerS: null, bytesPerS: null },
     warnings: [],
     ...given,

@@ -110,6 +110,13 @@ export function allFigures(result: AssessResult, observation: Observation): read
       title: "Band and data",
       rows: [
         [
+          "Position error",
+          observation.positionErrorM === null
+            ? "none stated"
+            : `${of("degrees", result.positionError.phaseDeg)}, ${of("fraction", result.positionError.coherence)} left`,
+          "phase of a baseline, part of a point’s peak; errors that are solved for cost nothing",
+        ],
+        [
           "Protected band",
           of("fraction", result.protectedFraction),
           "of the band: Radio Regulations 5.149 and 5.340, below 100 GHz",
