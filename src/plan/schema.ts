@@ -52,11 +52,11 @@ export const geometrySchema = v.variant(
 export const receiverSchema = record({
   fromHz: frequency("a frequency"),
   toHz: frequency("a frequency"),
-  /** Either this, or system temperature and aperture efficiency, of which it follows. */
+  // Either this, or system temperature and aperture efficiency, of which it follows.
   sefdJy: orNull(positive(1e12, "a system equivalent flux density", "Jy")),
-  /** Without the air over the site. */
+  // Without the air over the site.
   systemK: orNull(positive(1e6, "a system temperature", "K")),
-  /** Of a perfect surface: what `surfaceRmsM` costs comes on top (Ruze 1966). */
+  // Of a perfect surface: what `surfaceRmsM` costs comes on top (Ruze 1966).
   apertureEfficiency: orNull(positive(1, "an efficiency")),
   surfaceRmsM: v.optional(ranged(0, 1, "a surface error in [0, 1] metres"), 0),
 });
@@ -121,9 +121,9 @@ export const observationSchema = record({
   repeats: v.optional(whole(1, 100_000), 1),
   polarizations: v.optional(oneOf([1, 2]), 2),
   efficiency: v.optional(positive(1, "an efficiency"), 1),
-  /** Rms of every station coordinate that nobody knows of, metres: given, the results say what it costs. */
+  // Rms of every station coordinate that nobody knows of, metres: given, the results say what it costs.
   positionErrorM: orNull(ranged(0, 1000, "a position error in [0, 1000] metres")),
-  /** Water vapour at sea level under the site; given, the air's opacity counts in the noise. */
+  // Water vapour at sea level under the site; given, the air's opacity counts in the noise.
   vapourGm3: orNull(ranged(0, 50, "a water vapour density in [0, 50] g/m³")),
   weighting: v.optional(weightingSchema, {}),
   image: v.optional(imageSchema, {}),
